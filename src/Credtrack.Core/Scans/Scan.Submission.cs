@@ -1,0 +1,42 @@
+using Credtrack.Core.Catalogue;
+using Credtrack.Core.People;
+
+namespace Credtrack.Core.Scans;
+
+public sealed partial class Scan
+{
+    /// <summary>What a reader would miss, each with the name of the value it is about. A question that decides nothing may stay open.</summary>
+    /// <param name="pictures">how many there are</param>
+    /// <param name="supervised">at the bedside, by a person named</param>
+    public static IEnumerable<(string About, string Why)> Missing(IEnumerable<Answered> answers, int pictures, bool supervised)
+    {
+        foreach (var open in answers.Where(a => a.Positive is not null && a.Given is null))
+            yield return ($"{nameof(Answers)}[{open.Code}]", $"Answer “{open.Text}”; Unclear is an answer too.");
+        if (pictures == 0 && !supervised)
+            yield return (nameof(Pictures), "Attach a picture, or name who supervised at the bedside: without pictures only that person can read the scan.");
+    }
+
+    public string? WhyIncomplete => Missing(Answers, ShownPictures.Count(), Supervision == Supervision.Direct).Select(m => m.Why).FirstOrDefault();
+
+    public string? WhyNotSubmit(Person by) =>
+          by.Id != TraineeId          ? "Only the person who logged a scan submits it."
+        : State is ScanState.Waiting  ? "This scan is already submitted."
+        : WhyNotChange(by) ?? WhyIncomplete;
+
+    public void Submit(Person by, DateTime at)
+    {
+        RuleBroken.If(WhyNotSubmit(by));
+        submissions.Add(new Submission(this, submissions.Count + 1, at));
+        Record(new ScanSubmitted(by, at));
+    }
+
+    public string? WhyNotDiscard(Person by) =>
+        WhyNotChange(by) ?? (submissions.Count > 0 ? "Only a draft that was never submitted is discarded." : null);
+
+    public void Discard(Person by, DateTime at)
+    {
+        RuleBroken.If(WhyNotDiscard(by));
+        Withdrawal = new Withdrawal(this, by, at);
+        Record(new DraftDiscarded(by, at));
+    }
+}

@@ -1,0 +1,53 @@
+using System.Text.Json;
+using Credtrack.Core.Scans;
+using Microsoft.AspNetCore.DataProtection;
+using Microsoft.AspNetCore.Mvc.ModelBinding;
+
+namespace Credtrack.Web.Features.Scans.Pictures;
+
+/// <summary>A picture that is in the store but on no scan yet, with the sealed note by which the form brings it back.</summary>
+public sealed record KeptPicture(string Note, StoredStill Still);
+
+/// <summary>Takes the pictures of a form. A good one is kept even if the rest of the form comes back, so that nobody has to attach it twice.</summary>
+public sealed class Uploads(PictureFiles files, IDataProtectionProvider protection)
+{
+    public const int LongestFile = 15 * 1024 * 1024;
+
+    /// <summary>Room for twelve of the largest files and the rest of the form.</summary>
+    public const long LongestForm = Scan.MostPictures * (long)LongestFile + 10 * 1024 * 1024;
+
+    private const string Field = "Form.Pictures";
+
+    public async Task<IReadOnlyList<KeptPicture>> Take(Guid personId, ScanForm form, int already, ModelStateDictionary faults)
+    {
+        var seal = protection.CreateProtector("picture kept for", personId.ToString());
+        List<KeptPicture> kept = [.. form.Kept.Select(note => new KeptPicture(note, JsonSerializer.Deserialize<StoredStill>(seal.Unprotect(note))!))];
+        for (var n = 0; n < form.Pictures.Count; n++)
+        {
+            if (already + kept.Count >= Scan.MostPictures)
+            {
+                faults.AddModelError(Field, $"A scan holds {Scan.MostPictures} pictures at most; those from picture {n + 1} on were left out.");
+                break;
+            }
+            var (still, why) = await Clean(form.Pictures[n]);
+            if (still is null) faults.AddModelError(Field, form.Pictures.Count == 1 ? why! : $"Picture {n + 1}: {why}");
+            else kept.Add(await Keep(still, seal));
+        }
+        if (kept.Count > 0 && !form.NobodyNamed) faults.AddModelError("Form.NobodyNamed", "Look at each picture and confirm that no patient is named in it.");
+        return kept;
+    }
+
+    private async Task<KeptPicture> Keep(StillImage still, IDataProtector seal)
+    {
+        var stored = await files.Keep(still);
+        return new(seal.Protect(JsonSerializer.Serialize(stored)), stored);
+    }
+
+    private static async Task<(StillImage? Still, string? Why)> Clean(IFormFile file)
+    {
+        if (file.Length > LongestFile) return (null, "This file is larger than 15 MB. Export the picture smaller, or as JPEG, and attach it again.");
+        using var bytes = new MemoryStream((int)file.Length);
+        await file.CopyToAsync(bytes);
+        return await StillImage.From(bytes.ToArray());
+    }
+}

@@ -1,0 +1,66 @@
+using System.Globalization;
+using Credtrack.Core.Measures;
+using Credtrack.Core.Scans;
+using Microsoft.AspNetCore.Mvc.ModelBinding;
+
+namespace Credtrack.Web.Features.Scans;
+
+/// <summary>From what was typed to what the noun takes. Every fault goes to its field; the sentences are the noun's own wherever it has one.</summary>
+public static class ScanFormEntry
+{
+    public static ScanEntry? ToEntry(this ScanForm form, ScanFormPage page, ModelStateDictionary faults, Guid traineeId, TimeZoneInfo zone, DateTime now)
+    {
+        if (page.Chosen is not { } application)
+        {
+            faults.AddModelError("Form.Application", "Choose the application you scanned.");
+            return null;
+        }
+        var settings = new MachineSettings(form.Transducer,
+            Number(form.Depth, "Depth", 10, "15 or 15.5", faults), Number(form.Frequency, "Frequency", 1000, "3.5", faults),
+            Number(form.MechanicalIndex, "MechanicalIndex", 100, "0.9", faults), Number(form.ThermalIndex, "ThermalIndex", 100, "0.4", faults));
+        var supervisor = page.Readers.SingleOrDefault(r => r.Id == form.Supervisor);
+        if (form.Supervisor is not null && supervisor is null) faults.AddModelError("Form.Supervisor", "Choose a reader of this programme.");
+        var performedAt = form.PerformedAt is { } local ? LocalTimes.ToUtc(DateTime.SpecifyKind(local, DateTimeKind.Unspecified), zone) : now;
+        var entry = new ScanEntry(application, Trimmed(form.Subtype), performedAt, form.Role, form.Setting, form.Indicated,
+            supervisor is null ? Supervision.Later : Supervision.Direct, supervisor, form.Assisted, settings, Trimmed(form.Note), form.Views, form.Answers);
+        foreach (var (about, why) in entry.Faults(traineeId, page.ProgrammeId, now)) faults.AddModelError($"Form.{FieldOf(about)}", why);
+        foreach (var (about, why) in Missing(form, page, entry)) faults.AddModelError($"Form.{about}", why);
+        return faults.IsValid ? entry : null;
+    }
+
+    public static Scan Log(this ScanForm form, Person by, ScanFormPage page, ScanEntry entry, Scan? samePatient, DateTime now)
+    {
+        var scan = Scan.Log(by, page.Programmes.First(m => m.ProgrammeId == page.ProgrammeId).Programme, form.Id, entry, samePatient, now);
+        foreach (var picture in page.Kept) scan.Attach(by, picture.Still, now);
+        if (!form.IsDraft) scan.Submit(by, now);
+        return scan;
+    }
+
+    /// <summary>A draft may be as incomplete as it likes; what waits for a reading stays complete.</summary>
+    private static IEnumerable<(string About, string Why)> Missing(ScanForm form, ScanFormPage page, ScanEntry entry)
+    {
+        if (form.IsDraft && page.Scan?.State != ScanState.Waiting) return [];
+        var asked = page.Scan?.QuestionsUnder(entry.Application) ?? entry.Application.Questions;
+        var answers = asked.Select(q => q.With(entry.Answers.TryGetValue(q.Code, out var given) ? given : null));
+        return Scan.Missing(answers, page.PicturesAfter, entry.Supervision == Supervision.Direct);
+    }
+
+    /// <summary>The value in whole units of 1/scale; up to three digits of a decimal, with a point or a comma.</summary>
+    private static int? Number(string? typed, string field, int scale, string example, ModelStateDictionary faults)
+    {
+        if (string.IsNullOrWhiteSpace(typed)) return null;
+        if (decimal.TryParse(typed.Trim().Replace(',', '.'), NumberStyles.AllowDecimalPoint, CultureInfo.InvariantCulture, out var number) && number < 100_000)
+            return (int)Math.Round(number * scale);
+        faults.AddModelError($"Form.{field}", $"Enter a number such as {example}, or leave this empty.");
+        return null;
+    }
+
+    private static string FieldOf(string about) => about switch
+    {
+        nameof(MachineSettings.DepthMm) => nameof(ScanForm.Depth),
+        nameof(MachineSettings.FrequencyKhz) => nameof(ScanForm.Frequency),
+        _ => about,
+    };
+
+    private static string? Trimmed(string? text) => string.IsNullOrWhiteSpace(text) ? null : text.Trim();
+}

@@ -1,0 +1,95 @@
+using Credtrack.Core.Catalogue;
+using Credtrack.Core.Rulebooks;
+using Credtrack.Web.Features.Scans.Pictures;
+using Microsoft.AspNetCore.Identity;
+
+namespace Credtrack.Web.Features.SignIn.Demo;
+
+/// <summary>An invented institution with two programmes and a year of scans, made from a seed through the same verbs as real ones.</summary>
+public sealed class DemoSite(CredtrackDb db, PictureFiles pictures, DateTime now)
+{
+    public const string Password = "scan-and-read-2026";
+
+    private readonly List<Person> people = [];
+    private Person director = null!;
+
+    public static async Task Build(IServiceProvider services)
+    {
+        await using var scope = services.CreateAsyncScope();
+        var db = scope.ServiceProvider.GetRequiredService<CredtrackDb>();
+        if (await db.People.AnyAsync()) return;
+        await new DemoSite(db, scope.ServiceProvider.GetRequiredService<PictureFiles>(), services.GetRequiredService<TimeProvider>().UtcNow()).Build();
+    }
+
+    private async Task Build()
+    {
+        var start = now.AddYears(-3);
+        director = Enrol("Dr Seraphine Okwuosa-Lund", start);
+        var site = Site.Found(director, "Brindlemoor General (invented)", "Europe/Dublin", start);
+        var applications = CatalogueEntry.Shipped.Select(entry => Application.List(director, entry, start)).ToList();
+        var emergency = Programme.Found(director, "Emergency medicine", start);
+        var medicine = Programme.Found(director, "Internal medicine", start);
+        director.Join(director, emergency, MembershipKind.Director, start);
+        Member("Dr Caspian Rothermere-Vale", medicine, MembershipKind.Director, start);
+        Member("Nuala Fitzmaurice-Hart", emergency, MembershipKind.Coordinator, start);
+        Member("Bram Oyelaran", medicine, MembershipKind.Coordinator, start);
+        foreach (var name in DemoNames.EmergencyReaders) Member(name, emergency, MembershipKind.Reader, start);
+        foreach (var name in DemoNames.MedicineReaders) Member(name, medicine, MembershipKind.Reader, start);
+        people.Single(p => p.Name == DemoNames.EmergencyReaders[0]).Join(director, medicine, MembershipKind.Reader, start);
+        Trainees(DemoNames.EmergencyTrainees, emergency);
+        Trainees(DemoNames.MedicineTrainees, medicine);
+        var rulebooks = new[] { DemoRulebooks.Emergency(director, emergency, now), DemoRulebooks.Medicine(people.Single(p => p.Is(MembershipKind.Director, medicine.Id)), medicine, now) };
+
+        db.Add(site);
+        db.AddRange([emergency, medicine, .. applications, .. people, .. rulebooks]);
+        db.AddRange(Accounts());
+        await db.SaveChangesAsync();
+        await new DemoScans(db, pictures, people, applications, now).Build([emergency, medicine]);
+    }
+
+    private void Trainees(string[] names, Programme programme)
+    {
+        for (var n = 0; n < names.Length; n++)
+        {
+            var year = n * 3 / names.Length + 1;
+            var trainee = Member(names[n], programme, MembershipKind.Trainee, now.AddMonths(-4).AddYears(1 - year), $"year {year}");
+            var away = DateOnly.FromDateTime(now.AddDays(-40 - 11 * n));
+            if (n % 4 == 1) trainee.BeAway(director, programme, away, away.AddDays(20), now.AddDays(-60 - 11 * n));
+        }
+    }
+
+    private Person Member(string name, Programme programme, MembershipKind kind, DateTime at, string? yearGroup = null)
+    {
+        var person = Enrol(name, at);
+        person.Join(director, programme, kind, at, yearGroup);
+        return person;
+    }
+
+    private Person Enrol(string name, DateTime at)
+    {
+        var person = Person.Enrol(name, people.FirstOrDefault(), at);
+        people.Add(person);
+        return person;
+    }
+
+    // One hash for all: hashing it once for each person would hold up the first start for seconds.
+    private IEnumerable<Account> Accounts()
+    {
+        var hash = new PasswordHasher<Account>().HashPassword(new Account(), Password);
+        foreach (var person in people)
+        {
+            person.OpenAccount(director, now);
+            var address = DemoNames.AddressOf(person.Name);
+            yield return new Account
+            {
+                Id = person.Id,
+                UserName = address,
+                NormalizedUserName = address.ToUpperInvariant(),
+                Email = address,
+                NormalizedEmail = address.ToUpperInvariant(),
+                PasswordHash = hash,
+                SecurityStamp = Guid.NewGuid().ToString("N"),
+            };
+        }
+    }
+}
