@@ -1,0 +1,21 @@
+using Credtrack.Core.Scans;
+
+namespace Credtrack.Core.Measures.Standings;
+
+/// <summary>What a requirement is measured on: one application's findings, a group's, or those of all listed applications, in order.</summary>
+public sealed record Basis(DateOnly AsOf, IReadOnlyList<Finding> Findings)
+{
+    /// <summary>For overall requirements: what has been found for each application.</summary>
+    public IReadOnlyList<ApplicationStanding> Applications { get; init; } = [];
+
+    /// <summary>For items: those dated on or before the day.</summary>
+    public IReadOnlyList<ItemEvidence> Items { get; init; } = [];
+
+    public IEnumerable<SeenScan> Counting => Findings.Where(f => f.Verdict == Verdict.Counts).Select(f => f.Seen);
+
+    public IEnumerable<SeenScan> Pending => Findings.Where(f => f.Verdict == Verdict.Pending).Select(f => f.Seen);
+
+    /// <summary>Read scans performed by the trainee, neither duplicate nor introductory, whatever the counting filter says.</summary>
+    public IEnumerable<SeenScan> Population => Findings
+        .Where(f => f.Seen.IsRead && f.Seen.Evidence.Role == Role.Performed && f.Reason is not (Finding.Duplicate or Finding.Introduction)).Select(f => f.Seen);
+}

@@ -1,0 +1,77 @@
+using nietras.SeparatedValues;
+
+namespace Credtrack.Web.Commands;
+
+/// <summary>Something wrong in a table: the first line of the record, the column where it is one column's fault, and what was expected.</summary>
+public sealed record CsvFault(int Line, string? Column, string Expected);
+
+/// <summary>A table with a header row, by RFC 4180 with either line end. Cells are compared exactly: nothing is trimmed or folded.</summary>
+public sealed class CsvTable
+{
+    private readonly Dictionary<string, int> places = new(StringComparer.Ordinal);
+
+    public List<CsvFault> Faults { get; } = [];
+    public List<CsvRow> Rows { get; } = [];
+    public IReadOnlyCollection<string> Columns => places.Keys;
+
+    public int? PlaceOf(string column) => places.TryGetValue(column, out var place) ? place : null;
+
+    public static CsvTable Read(string text, IEnumerable<string> required)
+    {
+        var table = new CsvTable();
+        // Sep keeps lines and cells; headers, counts and quotes are judged here, because a fault must name its line and column.
+        using var reader = Sep.New(',').Reader(options => options with { HasHeader = false, DisableColCountCheck = true, Unescape = false }).FromText(text);
+        var header = 0;
+        foreach (var record in reader)
+        {
+            if (header == 0) header = table.AddHeader(record, required);
+            else table.Add(record, header);
+        }
+        if (header == 0) table.Faults.Add(new(1, null, "expected a header row"));
+        return table;
+    }
+
+    private int AddHeader(SepReader.Row record, IEnumerable<string> required)
+    {
+        for (var place = 0; place < record.ColCount; place++)
+        {
+            var name = Plain(record[place].Span);
+            if (name is null) Faults.Add(new(1, null, $"expected quotes around the whole of column name {place + 1}, and doubled inside"));
+            else if (!places.TryAdd(name, place)) Faults.Add(new(1, name, "expected this column once"));
+        }
+        Faults.AddRange(required.Where(name => !places.ContainsKey(name)).Select(name => new CsvFault(1, name, "expected this column, which is missing")));
+        return record.ColCount;
+    }
+
+    private void Add(SepReader.Row record, int width)
+    {
+        // A line without a single character holds no evidence; many editors leave one at the end.
+        if (record.ColCount == 1 && record[0].Span.IsEmpty) return;
+        if (record.ColCount != width)
+        {
+            Faults.Add(new(record.LineNumberFrom, null, $"expected {width} cells, found {record.ColCount}"));
+            return;
+        }
+        var cells = new string[width];
+        for (var place = 0; place < width; place++)
+        {
+            if (Plain(record[place].Span) is { } cell)
+            {
+                cells[place] = cell;
+                continue;
+            }
+            Faults.Add(new(record.LineNumberFrom, places.FirstOrDefault(p => p.Value == place).Key, "expected quotes around the whole cell, and doubled inside"));
+            cells[place] = "";
+        }
+        Rows.Add(new CsvRow(this, record.LineNumberFrom, cells));
+    }
+
+    /// <summary>What the cell means, or null where its quotes are out of place.</summary>
+    private static string? Plain(ReadOnlySpan<char> raw)
+    {
+        if (!raw.Contains('"')) return raw.ToString();
+        if (raw.Length < 2 || raw[0] != '"' || raw[^1] != '"') return null;
+        var inner = raw[1..^1].ToString();
+        return inner.Replace("\"\"", "", StringComparison.Ordinal).Contains('"') ? null : inner.Replace("\"\"", "\"", StringComparison.Ordinal);
+    }
+}
