@@ -1,0 +1,10 @@
+namespace Credtrack.Web.Features.Shared.Figures;
+
+public enum IconName
+{
+    Brand,
+    Note,
+    Bad,
+    Probe,
+    Empty,
+}
