@@ -3,7 +3,7 @@ using Credtrack.Core.Measures.Standings;
 
 namespace Credtrack.Core.Rulebooks;
 
-public enum Answer { No, Open, Yes }
+public enum Fit { No, Open, Yes }
 
 /// <summary>Conditions that must all hold, in the order in which a reason is looked for.</summary>
 /// <param name="Read">The key read: null is not given, which is true; false admits unread scans.</param>
@@ -12,15 +12,15 @@ public sealed record Filter(IReadOnlyList<Condition> Conditions, bool? Read = nu
     private bool AsksReading => (Read ?? true) || Conditions.Any(c => c.OfReading);
 
     /// <summary>Yes; no with the first condition that fails; or open, which only a reading can settle.</summary>
-    public Answer For(SeenScan scan, out Condition? failed)
+    public Fit For(SeenScan scan, out Condition? failed)
     {
         failed = Conditions.FirstOrDefault(c => (scan.IsRead || !c.OfReading) && !c.Holds(scan));
-        return failed is not null ? Answer.No : !scan.IsRead && AsksReading ? Answer.Open : Answer.Yes;
+        return failed is not null ? Fit.No : !scan.IsRead && AsksReading ? Fit.Open : Fit.Yes;
     }
 
-    public bool Matches(SeenScan scan) => For(scan, out _) == Answer.Yes;
+    public bool Matches(SeenScan scan) => For(scan, out _) == Fit.Yes;
 
-    public bool MayMatch(SeenScan scan) => For(scan, out _) != Answer.No;
+    public bool MayMatch(SeenScan scan) => For(scan, out _) != Fit.No;
 
     /// <summary>This filter laid over another key by key: a key given here replaces, a key in <paramref name="removed"/> goes.</summary>
     public Filter Over(Filter below, IReadOnlySet<string> removed)

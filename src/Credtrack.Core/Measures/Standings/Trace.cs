@@ -45,8 +45,8 @@ internal static class Trace
 
     private static Finding Filtered(SeenScan scan, Filter counting) => counting.For(scan, out var failed) switch
     {
-        Answer.Yes => Finding.Of(scan, Verdict.Counts),
-        Answer.Open => Finding.Of(scan, Verdict.Pending),
+        Fit.Yes => Finding.Of(scan, Verdict.Counts),
+        Fit.Open => Finding.Of(scan, Verdict.Pending),
         _ => Finding.Of(scan, Verdict.Excluded, failed!.Key) with { Failed = failed },
     };
 

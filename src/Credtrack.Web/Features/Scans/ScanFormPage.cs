@@ -36,7 +36,7 @@ public sealed record ScanFormPage(
             .Where(p => p.Id != me.Person.Id && p.Memberships.Any(m => m.Kind == MembershipKind.Reader && m.ProgrammeId == programmeId && m.FirstDay <= today && (m.LastDay == null || m.LastDay >= today)))
             .OrderBy(p => p.Name).ToListAsync();
         var evidence = (await db.EvidenceOf([me.Person.Id]))[me.Person.Id].ToList();
-        var rules = RulesOf.InForce(await db.RulebookInForce(programmeId));
+        var rules = RulesOf.InForce(await db.RulebookInForce(programmeId), me.Site);
         return new(form, programmeId, programmes, applications, Recent(applications, evidence, rules, today, form.Application), readers, scan, scan?.WhyNotChange(me.Person));
     }
 
@@ -48,7 +48,7 @@ public sealed record ScanFormPage(
         if (chosen is not null && !codes.Contains(chosen)) codes = [chosen, .. codes.Take(3)];
         return [.. from code in codes
                    join application in applications on code equals application.Code
-                   let line = standing is null ? null : StandingLine.Of(standing, rules!, application.Code, application.Name)
+                   let line = standing is null ? null : StandingLine.Of(standing, application.Code, application.Name)
                    select new ApplicationTile(application, line?.Depth, line?.Said ?? "")];
     }
 }

@@ -2,14 +2,14 @@ using Credtrack.Core.Rulebooks;
 
 namespace Credtrack.Web.Features.Standings;
 
-/// <summary>What was published was read without a fault then; if it no longer is, that is our fault and must be seen.</summary>
 public static class RulesOf
 {
-    public static Rules? InForce(Rulebook? rulebook) => rulebook is null ? null : Read(rulebook);
+    public static Rules? InForce(Rulebook? rulebook, Site site) => rulebook is null ? null : Read(rulebook, site);
 
-    public static Rules Read(Rulebook rulebook)
+    /// <summary>What was published was read without a fault then; if it no longer is, that is our fault and must be seen.</summary>
+    public static Rules Read(Rulebook rulebook, Site site)
     {
-        var faults = RulesReader.Read(rulebook.Text, "UTC", out var rules);
-        return rules ?? throw new InvalidOperationException($"Rulebook {rulebook.Id} does not read any more: {faults[0]}");
+        var read = RulesReader.Read(rulebook.Text, site.TimeZone);
+        return read.Rules ?? throw new InvalidOperationException($"Rulebook {rulebook.Id} does not read any more: {read.Faults[0]}");
     }
 }

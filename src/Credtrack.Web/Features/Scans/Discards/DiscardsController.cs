@@ -1,0 +1,16 @@
+namespace Credtrack.Web.Features.Scans.Discards;
+
+/// <summary>One button on the page of a draft. The row stays, marked as discarded; nobody finds it any more.</summary>
+[Route("scans/{scanId:guid}/discards")]
+[Members(MembershipKind.Trainee)]
+public sealed class DiscardsController(CredtrackDb db, Me me, TimeProvider clock) : Controller
+{
+    [HttpPost("")]
+    public async Task<IActionResult> Create(Guid scanId)
+    {
+        if (await db.ScansVisibleTo(me.Person).Find(scanId) is not { } scan) return NotFound();
+        scan.Discard(me.Person, clock.UtcNow());
+        await db.SaveChangesAsync();
+        return this.Done("~/scans", "Draft discarded");
+    }
+}

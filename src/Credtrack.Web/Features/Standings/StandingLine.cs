@@ -1,0 +1,41 @@
+using Credtrack.Core.Measures.Standings;
+using Credtrack.Core.Rulebooks;
+using Credtrack.Core.Rulebooks.Requirements;
+using Credtrack.Web.Features.Shared.Figures;
+
+namespace Credtrack.Web.Features.Standings;
+
+/// <summary>One application of a standing as the pages say it. The depth is that of the plain count; every other condition keeps the notch open.</summary>
+public sealed record StandingLine(string Code, string Name, Depth? Depth, ApplicationStanding Standing, int Excluded)
+{
+    public int OpenConditions => Standing.Requirements.Count(r => !r.Met);
+    public int Missing => Depth?.Missing ?? 0;
+
+    /// <summary>"7 missing, 3 wait", "met, 4 beyond", "count reached; 2 positive scans missing".</summary>
+    public string Said
+    {
+        get
+        {
+            var waiting = Standing.Pending > 0 ? $", {Standing.Pending} {(Standing.Pending == 1 ? "waits" : "wait")}" : "";
+            var beyond = Standing.Counted - (Depth?.Required ?? 0);
+            if (Standing.Met) return (beyond > 0 && Depth is not null ? $"met, {beyond} beyond" : "met") + waiting;
+            var others = Standing.Requirements.Where(r => !r.Met && r.Asked is not Count { Where: null }).Select(Lacking).ToList();
+            var first = Missing > 0 ? $"{Missing} missing" : Depth is null ? "not met" : "count reached";
+            var cap = Depth?.OverCap > 0 ? $"{Depth.OverCap} over a cap" : null;
+            return string.Join("; ", new[] { first + waiting, .. others, cap }.OfType<string>());
+        }
+    }
+
+    public static StandingLine Of(Standing standing, ApplicationStanding application, string name)
+    {
+        var required = application.Requirements.Select(r => r.Asked).OfType<Count>().Where(c => c.Where is null).Select(c => (int)c.Min).DefaultIfEmpty(-1).Max();
+        var capped = standing.Findings.Count(f => f.Application == application.Code && f.Cap is not null);
+        var depth = required < 0 ? null : new Depth(application.Code, name, required, application.Counted, application.Pending, capped, application.Met);
+        return new(application.Code, name, depth, application, application.Excluded.Values.Sum());
+    }
+
+    public static StandingLine? Of(Standing standing, string code, string name) =>
+        standing.Applications.FirstOrDefault(a => a.Code == code) is { } application ? Of(standing, application, name) : null;
+
+    private static string Lacking(RequirementStanding requirement) => requirement.Missing is not null ? $"{requirement.Lacks} missing" : requirement.Lacks!;
+}
