@@ -8,6 +8,9 @@ public sealed record CsvFault(int Line, string? Column, string Expected);
 /// <summary>A table with a header row, by RFC 4180 with either line end. Cells are compared exactly: nothing is trimmed or folded.</summary>
 public sealed class CsvTable
 {
+    /// <summary>Below what Sep can hold, and far above any record of ours.</summary>
+    public const int LongestRecord = 1_000_000;
+
     private readonly Dictionary<string, int> places = new(StringComparer.Ordinal);
 
     public List<CsvFault> Faults { get; } = [];
@@ -19,6 +22,11 @@ public sealed class CsvTable
     public static CsvTable Read(string text, IEnumerable<string> required)
     {
         var table = new CsvTable();
+        if (TooLong(text) is { } line)
+        {
+            table.Faults.Add(new(line, null, $"expected a record of at most {LongestRecord} characters; is a quote left open?"));
+            return table;
+        }
         // Sep keeps lines and cells; headers, counts and quotes are judged here, because a fault must name its line and column.
         using var reader = Sep.New(',').Reader(options => options with { HasHeader = false, DisableColCountCheck = true, Unescape = false }).FromText(text);
         var header = 0;
@@ -64,6 +72,21 @@ public sealed class CsvTable
             cells[place] = "";
         }
         Rows.Add(new CsvRow(this, record.LineNumberFrom, cells));
+    }
+
+    /// <summary>The first line of the first record that is too long, as one is whose quote is never closed.</summary>
+    private static int? TooLong(string text)
+    {
+        var (line, first, start, quoted) = (1, 1, 0, false);
+        for (var at = 0; at < text.Length; at++)
+        {
+            if (at - start >= LongestRecord) return first;
+            if (text[at] == '"') quoted = !quoted;
+            if (text[at] != '\n') continue;
+            line++;
+            if (!quoted) (first, start) = (line, at + 1);
+        }
+        return null;
     }
 
     /// <summary>What the cell means, or null where its quotes are out of place.</summary>

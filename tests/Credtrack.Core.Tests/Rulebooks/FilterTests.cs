@@ -1,0 +1,122 @@
+using Credtrack.Core.Measures.Standings;
+using Credtrack.Core.Readings;
+using Credtrack.Core.Rulebooks;
+using Credtrack.Core.Scans;
+
+namespace Credtrack.Core.Tests.Rulebooks;
+
+public sealed class FilterTests
+{
+    private static readonly ScanEvidence Unread = Book.Scan("a", 10);
+
+    // A read, clinical, indicated, unassisted scan of 10 March, performed, supervised later, subtype femoral, quality 3, views adequate, TP.
+    private static readonly ScanEvidence Typical = Unread.As(Result.TP) with { Subtype = "femoral" };
+
+    [Theory]
+    [InlineData("{}", Answer.Yes)]
+    [InlineData("""{ "performed": {} }""", Answer.Yes)]
+    [InlineData("""{ "performed": { "from": "2026-03-10", "to": "2026-03-10" } }""", Answer.Yes)]
+    [InlineData("""{ "performed": { "from": "2026-03-11" } }""", Answer.No, "performed", "performed before 2026-03-11")]
+    [InlineData("""{ "performed": { "to": "2026-03-09" } }""", Answer.No, "performed", "performed after 2026-03-09")]
+    [InlineData("""{ "role": ["interpreted", "performed"] }""", Answer.Yes)]
+    [InlineData("""{ "role": ["interpreted"] }""", Answer.No, "role", "role performed is not among interpreted")]
+    [InlineData("""{ "setting": ["clinical"] }""", Answer.Yes)]
+    [InlineData("""{ "setting": ["education", "simulation"] }""", Answer.No, "setting", "setting clinical is not among teaching, simulation")]
+    [InlineData("""{ "indicated": true }""", Answer.Yes)]
+    [InlineData("""{ "indicated": false }""", Answer.No, "indicated", "clinically indicated")]
+    [InlineData("""{ "supervision": ["later"] }""", Answer.Yes)]
+    [InlineData("""{ "supervision": ["direct", "none"] }""", Answer.No, "supervision", "supervision supervised later is not among directly supervised, unsupervised")]
+    [InlineData("""{ "assisted": false }""", Answer.Yes)]
+    [InlineData("""{ "assisted": true }""", Answer.No, "assisted", "unassisted")]
+    [InlineData("""{ "subtype": ["femoral"] }""", Answer.Yes)]
+    [InlineData("""{ "subtype": ["Femoral"] }""", Answer.No, "subtype", "subtype femoral is not among Femoral")]
+    [InlineData("""{ "read": true }""", Answer.Yes)]
+    [InlineData("""{ "read": false }""", Answer.Yes)]
+    [InlineData("""{ "quality": { "min": 3 } }""", Answer.Yes)]
+    [InlineData("""{ "quality": { "min": 4 } }""", Answer.No, "quality", "image quality below 4")]
+    [InlineData("""{ "views": true }""", Answer.Yes)]
+    [InlineData("""{ "views": false }""", Answer.No, "views", "all required views are adequate")]
+    [InlineData("""{ "result": ["TP", "TN"] }""", Answer.Yes)]
+    [InlineData("""{ "result": ["FN"] }""", Answer.No, "result", "result TP is not among FN")]
+    [InlineData("""{ "positive": true }""", Answer.Yes)]
+    [InlineData("""{ "positive": false }""", Answer.No, "positive", "result TP is not negative")]
+    [InlineData("""{ "positive": false, "assisted": true, "quality": { "min": 5 } }""", Answer.No, "assisted", "unassisted")]
+    public void A_read_scan_is_answered_with_yes_or_the_first_key_that_fails(string filter, Answer answer, string? key = null, string? words = null) =>
+        Assert.Equal((answer, key, words), Ask(filter, Typical));
+
+    [Theory]
+    [InlineData("{}", Answer.Open)]
+    [InlineData("""{ "read": false }""", Answer.Yes)]
+    [InlineData("""{ "read": false, "role": ["performed"] }""", Answer.Yes)]
+    [InlineData("""{ "read": false, "quality": { "min": 1 } }""", Answer.Open)]
+    [InlineData("""{ "read": false, "views": false }""", Answer.Open)]
+    [InlineData("""{ "read": false, "result": ["TP"] }""", Answer.Open)]
+    [InlineData("""{ "read": false, "positive": true }""", Answer.Open)]
+    [InlineData("""{ "quality": { "min": 5 }, "assisted": true }""", Answer.No, "assisted")]
+    public void An_unread_scan_stays_open_where_a_reading_may_decide(string filter, Answer answer, string? key = null)
+    {
+        var (given, failed, _) = Ask(filter, Unread);
+        Assert.Equal((answer, key), (given, failed));
+    }
+
+    [Theory]
+    [InlineData("""{ "subtype": ["femoral"] }""", "subtype", "no subtype given")]
+    [InlineData("""{ "quality": { "min": 1 } }""", "quality", "no image quality given")]
+    [InlineData("""{ "views": false }""", "views", "the required views were not judged")]
+    [InlineData("""{ "result": ["ID"] }""", "result", "no result given")]
+    [InlineData("""{ "positive": false }""", "positive", "no result given")]
+    public void A_read_scan_that_lacks_the_value_fails_at_its_key(string filter, string key, string words) =>
+        Assert.Equal((Answer.No, key, words), Ask(filter, Unread.As(null, null, null)));
+
+    [Theory] // positive holds where the truth is positive; ID is neither
+    [InlineData(Result.TP, true)]
+    [InlineData(Result.FN, true)]
+    [InlineData(Result.TN, false)]
+    [InlineData(Result.FP, false)]
+    [InlineData(Result.ID, null)]
+    public void Positive_is_the_truth_and_not_the_answer(Result result, bool? truth)
+    {
+        Assert.Equal(truth == true, Ask("""{ "positive": true }""", Unread.As(result)).Answer == Answer.Yes);
+        Assert.Equal(truth == false, Ask("""{ "positive": false }""", Unread.As(result)).Answer == Answer.Yes);
+    }
+
+    [Theory]
+    [InlineData("{}", "read", "1 scan")]
+    [InlineData("""{ "read": false }""", "read or not", "1 scan")]
+    [InlineData("""{ "setting": ["education"], "assisted": false, "quality": { "min": 3 } }""", "teaching, unassisted, of image quality 3 or better", "1 teaching unassisted scan of image quality 3 or better")]
+    [InlineData("""{ "positive": true, "supervision": ["direct"], "views": true }""", "directly supervised, with all required views adequate, positive", "1 positive scan directly supervised with all required views adequate")]
+    [InlineData("""{ "role": ["performed", "interpreted"], "subtype": ["a", "b"], "result": ["TP", "TN"] }""", "performed or interpreted, of subtype a or b, with result TP or TN", "1 performed or interpreted scan of subtype a or b with result TP or TN")]
+    [InlineData("""{ "performed": { "from": "2026-01-01" }, "indicated": false }""", "performed from 2026-01-01, not clinically indicated", "1 not clinically indicated scan performed from 2026-01-01")]
+    public void A_filter_reads_as_words(string filter, string words, string oneScan)
+    {
+        var read = Counting(filter);
+        Assert.Equal((words, oneScan), (read.Words, read.Scans(1)));
+        Assert.Equal(oneScan.Replace("1 ", "7 ", StringComparison.Ordinal).Replace("scan", "scans", StringComparison.Ordinal), read.Scans(7));
+    }
+
+    [Theory] // the application's counting laid over {"role": ["interpreted"], "quality": {"min": 4}, "performed": {"to": "2026-03-01"}}
+    [InlineData("{}", "performed", "role", "quality")]
+    [InlineData("""{ "role": ["performed"], "performed": {} }""", "quality")]
+    [InlineData("""{ "role": null, "performed": null }""", "quality")]
+    [InlineData("""{ "role": null, "quality": null, "performed": null, "read": null, "views": null }""")]
+    [InlineData("""{ "role": null, "quality": { "min": 3 }, "performed": null, "positive": false }""", "positive")]
+    public void A_key_of_the_application_replaces_the_whole_value_and_null_removes_it(string own, params string[] failing)
+    {
+        var counting = Book.Read($$"""
+            "counting": { "role": ["interpreted"], "quality": { "min": 4 }, "performed": { "to": "2026-03-01" }, "read": false },
+            "applications": [{ "code": "cardiac", "counting": {{own}}, "require": [] }]
+            """).Applications[0].Counting;
+        Assert.Equal(failing, counting.Conditions.Where(c => !c.Holds(See(Typical))).Select(c => c.Key));
+        Assert.Equal(own.Contains("read", StringComparison.Ordinal) ? null : false, counting.Read);
+    }
+
+    private static (Answer Answer, string? Key, string? Words) Ask(string filter, ScanEvidence scan)
+    {
+        var answer = Counting(filter).For(See(scan), out var failed);
+        return (answer, failed?.Key, failed?.WhyNot(See(scan)));
+    }
+
+    private static Filter Counting(string filter) => Book.Cardiac($$""" "counting": {{filter}}, "require": [] """).Applications[0].Counting;
+
+    private static SeenScan See(ScanEvidence scan) => SeenScan.On(Book.Day, scan, TimeZoneInfo.Utc)!;
+}
