@@ -26,6 +26,21 @@ public sealed record StandingLine(string Code, string Name, Depth? Depth, Applic
         }
     }
 
+    /// <summary>"3 lung scans"; where the count is reached, the first condition that is open.</summary>
+    public string NearestGap => Missing > 0 ? $"{Missing} {Name} {(Missing == 1 ? "scan" : "scans")}" : $"{Name}: {Standing.Requirements.Where(r => !r.Met).Select(r => r.Lacks).FirstOrDefault() ?? "a scan that counts"}";
+
+    /// <summary>What the waiting scans could do. Whether they count, their readings decide.</summary>
+    public string Hope => (Missing, Standing.Pending) switch
+    {
+        (0, _) => "The count is reached; the condition is still open.",
+        (_, 0) => "None wait for a reading.",
+        var (missing, pending) when pending >= missing && OpenConditions == 1 => $"{pending} wait. If {missing} of them {(missing == 1 ? "counts" : "count")}, the application is met.",
+        var (_, pending) => $"{pending} {(pending == 1 ? "waits" : "wait")} for a reading.",
+    };
+
+    /// <summary>All that is asked beside the plain count, with what there is of it.</summary>
+    public IEnumerable<string> Conditions => Standing.Requirements.Where(r => r.Asked is not Count { Where: null }).Select(r => r.Met ? $"{r.Asks}: met" : $"{r.Asks}: {r.Lacks} missing");
+
     public static StandingLine Of(Standing standing, ApplicationStanding application, string name)
     {
         var required = application.Requirements.Select(r => r.Asked).OfType<Count>().Where(c => c.Where is null).Select(c => (int)c.Min).DefaultIfEmpty(-1).Max();

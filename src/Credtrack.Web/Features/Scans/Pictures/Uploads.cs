@@ -11,10 +11,8 @@ public sealed record KeptPicture(string Note, StoredStill Still);
 /// <summary>Takes the pictures of a form. A good one is kept even if the rest of the form comes back, so that nobody has to attach it twice.</summary>
 public sealed class Uploads(PictureFiles files, IDataProtectionProvider protection)
 {
-    public const int LongestFile = 15 * 1024 * 1024;
-
     /// <summary>Room for twelve of the largest files and the rest of the form.</summary>
-    public const long LongestForm = Scan.MostPictures * (long)LongestFile + 10 * 1024 * 1024;
+    public const long LongestForm = Scan.MostPictures * (long)StillImage.MostBytes + 10 * 1024 * 1024;
 
     private const string Field = "Form.Pictures";
 
@@ -39,13 +37,14 @@ public sealed class Uploads(PictureFiles files, IDataProtectionProvider protecti
 
     private async Task<KeptPicture> Keep(StillImage still, IDataProtector seal)
     {
-        var stored = await files.Keep(still);
+        await files.Keep(still);
+        var stored = new StoredStill(still.Sha256, still.Width, still.Height);
         return new(seal.Protect(JsonSerializer.Serialize(stored)), stored);
     }
 
     private static async Task<(StillImage? Still, string? Why)> Clean(IFormFile file)
     {
-        if (file.Length > LongestFile) return (null, "This file is larger than 15 MB. Export the picture smaller, or as JPEG, and attach it again.");
+        if (file.Length > StillImage.MostBytes) return (null, "This file is larger than 15 MB. Export the picture smaller, or as JPEG, and attach it again.");
         using var bytes = new MemoryStream((int)file.Length);
         await file.CopyToAsync(bytes);
         return await StillImage.From(bytes.ToArray());
