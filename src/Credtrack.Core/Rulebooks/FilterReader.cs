@@ -9,10 +9,10 @@ internal static class FilterReader
     private static readonly (string Key, Func<string, JsonPart, Condition?> Read)[] Table =
     [
         ("performed", Performed),
-        ("role", (key, part) => Among(key, part, RuleWords.Roles, scan => scan.Evidence.Role, RuleWords.Said, before: true)),
-        ("setting", (key, part) => Among(key, part, RuleWords.Settings, scan => scan.Evidence.Setting, RuleWords.Said, before: true)),
+        ("role", (key, part) => Among(key, part, RuleWords.Roles, scan => scan.Evidence.Role, RuleWords.Said, RuleWords.Said, before: true)),
+        ("setting", (key, part) => Among(key, part, RuleWords.Settings, scan => scan.Evidence.Setting, RuleWords.Said, RuleWords.Said, before: true)),
         ("indicated", (key, part) => YesNo(key, part, scan => scan.Evidence.Indicated, "clinically indicated", "not clinically indicated")),
-        ("supervision", (key, part) => Among(key, part, RuleWords.Supervisions, scan => scan.Evidence.Supervision, RuleWords.Said, before: false)),
+        ("supervision", (key, part) => Among(key, part, RuleWords.Supervisions, scan => scan.Evidence.Supervision, RuleWords.Said, RuleWords.Named, before: false)),
         ("assisted", (key, part) => YesNo(key, part, scan => scan.Evidence.Assisted, "assisted", "unassisted")),
         ("subtype", Subtype),
         ("read", (_, _) => null),
@@ -51,12 +51,12 @@ internal static class FilterReader
             scan => scan.Day < from ? $"performed before {from:O}" : $"performed after {to:O}");
     }
 
-    private static Condition Among<T>(string key, JsonPart part, IReadOnlyDictionary<string, T> words, Func<SeenScan, T> of, Func<T, string> said, bool before) where T : struct
+    private static Condition Among<T>(string key, JsonPart part, IReadOnlyDictionary<string, T> words, Func<SeenScan, T> of, Func<T, string> said, Func<T, string> named, bool before) where T : struct
     {
         var wanted = part.FilledList().Select(item => item.OneOf(words)).OfType<T>().ToHashSet();
         var phrase = string.Join(" or ", wanted.Select(said));
         return new(key, false, scan => wanted.Contains(of(scan)), before ? phrase : null, before ? null : phrase,
-            scan => $"{key} {said(of(scan))} is not among {string.Join(", ", wanted.Select(said))}");
+            scan => $"{key} {named(of(scan))} is not among {string.Join(", ", wanted.Select(named))}");
     }
 
     private static Condition YesNo(string key, JsonPart part, Func<SeenScan, bool> of, string yes, string no)

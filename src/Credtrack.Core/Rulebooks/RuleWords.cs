@@ -33,6 +33,9 @@ public static class RuleWords
 
     public static string Said(Role role) => role.ToString().ToLowerInvariant();
 
+    /// <summary>As a value of its own: direct, later, none.</summary>
+    public static string Named(Supervision supervision) => supervision.ToString().ToLowerInvariant();
+
     public static string Said(Supervision supervision) => supervision switch
     {
         Supervision.Direct => "directly supervised",

@@ -15,7 +15,6 @@ public sealed class CsvTable
 
     public List<CsvFault> Faults { get; } = [];
     public List<CsvRow> Rows { get; } = [];
-    public IReadOnlyCollection<string> Columns => places.Keys;
 
     public int? PlaceOf(string column) => places.TryGetValue(column, out var place) ? place : null;
 

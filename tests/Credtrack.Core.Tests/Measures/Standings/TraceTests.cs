@@ -33,6 +33,7 @@ public sealed class TraceTests
         var outcome = new OutcomeEvidence(Book.Scan("a").PerformedAt, Result.FN);
         Assert.Equal(["a Counts", "b Pending", "c Counts"], rules.On(Book.Scan("a", 1).As(Result.TN) with { Outcome = outcome }, Book.Scan("b", 2) with { Outcome = outcome },
             Book.Scan("c", 3).As(null) with { Outcome = outcome }).Verdicts());
+        Assert.Null(SeenScan.On(Book.Day, Book.Scan("b", 2) with { Outcome = outcome }, TimeZoneInfo.Utc)!.Result);
     }
 
     [Fact]
