@@ -1,9 +1,9 @@
 using System.Text;
 using System.Text.Encodings.Web;
 using System.Text.Json;
+using Credtrack.Core.Measures;
 using Credtrack.Core.Measures.Standings;
 using Credtrack.Core.Rulebooks;
-using LocalTimes = Credtrack.Core.Measures.LocalTimes;
 
 namespace Credtrack.Web.Commands;
 

@@ -1,8 +1,8 @@
+using Credtrack.Core.Measures;
 using Credtrack.Core.Measures.Standings;
 using Credtrack.Core.Readings;
 using Credtrack.Core.Rulebooks;
 using Credtrack.Core.Scans;
-using LocalTimes = Credtrack.Core.Measures.LocalTimes;
 
 namespace Credtrack.Web.Commands;
 

@@ -13,47 +13,47 @@ public sealed class FilterTests
     private static readonly ScanEvidence Typical = Unread.As(Result.TP) with { Subtype = "femoral" };
 
     [Theory]
-    [InlineData("{}", Answer.Yes)]
-    [InlineData("""{ "performed": {} }""", Answer.Yes)]
-    [InlineData("""{ "performed": { "from": "2026-03-10", "to": "2026-03-10" } }""", Answer.Yes)]
-    [InlineData("""{ "performed": { "from": "2026-03-11" } }""", Answer.No, "performed", "performed before 2026-03-11")]
-    [InlineData("""{ "performed": { "to": "2026-03-09" } }""", Answer.No, "performed", "performed after 2026-03-09")]
-    [InlineData("""{ "role": ["interpreted", "performed"] }""", Answer.Yes)]
-    [InlineData("""{ "role": ["interpreted"] }""", Answer.No, "role", "role performed is not among interpreted")]
-    [InlineData("""{ "setting": ["clinical"] }""", Answer.Yes)]
-    [InlineData("""{ "setting": ["education", "simulation"] }""", Answer.No, "setting", "setting clinical is not among teaching, simulation")]
-    [InlineData("""{ "indicated": true }""", Answer.Yes)]
-    [InlineData("""{ "indicated": false }""", Answer.No, "indicated", "clinically indicated")]
-    [InlineData("""{ "supervision": ["later"] }""", Answer.Yes)]
-    [InlineData("""{ "supervision": ["direct", "none"] }""", Answer.No, "supervision", "supervision later is not among direct, none")]
-    [InlineData("""{ "assisted": false }""", Answer.Yes)]
-    [InlineData("""{ "assisted": true }""", Answer.No, "assisted", "unassisted")]
-    [InlineData("""{ "subtype": ["femoral"] }""", Answer.Yes)]
-    [InlineData("""{ "subtype": ["Femoral"] }""", Answer.No, "subtype", "subtype femoral is not among Femoral")]
-    [InlineData("""{ "read": true }""", Answer.Yes)]
-    [InlineData("""{ "read": false }""", Answer.Yes)]
-    [InlineData("""{ "quality": { "min": 3 } }""", Answer.Yes)]
-    [InlineData("""{ "quality": { "min": 4 } }""", Answer.No, "quality", "image quality below 4")]
-    [InlineData("""{ "views": true }""", Answer.Yes)]
-    [InlineData("""{ "views": false }""", Answer.No, "views", "all required views are adequate")]
-    [InlineData("""{ "result": ["TP", "TN"] }""", Answer.Yes)]
-    [InlineData("""{ "result": ["FN"] }""", Answer.No, "result", "result TP is not among FN")]
-    [InlineData("""{ "positive": true }""", Answer.Yes)]
-    [InlineData("""{ "positive": false }""", Answer.No, "positive", "result TP is not negative")]
-    [InlineData("""{ "positive": false, "assisted": true, "quality": { "min": 5 } }""", Answer.No, "assisted", "unassisted")]
-    public void A_read_scan_is_answered_with_yes_or_the_first_key_that_fails(string filter, Answer answer, string? key = null, string? words = null) =>
+    [InlineData("{}", Fit.Yes)]
+    [InlineData("""{ "performed": {} }""", Fit.Yes)]
+    [InlineData("""{ "performed": { "from": "2026-03-10", "to": "2026-03-10" } }""", Fit.Yes)]
+    [InlineData("""{ "performed": { "from": "2026-03-11" } }""", Fit.No, "performed", "performed before 2026-03-11")]
+    [InlineData("""{ "performed": { "to": "2026-03-09" } }""", Fit.No, "performed", "performed after 2026-03-09")]
+    [InlineData("""{ "role": ["interpreted", "performed"] }""", Fit.Yes)]
+    [InlineData("""{ "role": ["interpreted"] }""", Fit.No, "role", "role performed is not among interpreted")]
+    [InlineData("""{ "setting": ["clinical"] }""", Fit.Yes)]
+    [InlineData("""{ "setting": ["education", "simulation"] }""", Fit.No, "setting", "setting clinical is not among teaching, simulation")]
+    [InlineData("""{ "indicated": true }""", Fit.Yes)]
+    [InlineData("""{ "indicated": false }""", Fit.No, "indicated", "clinically indicated")]
+    [InlineData("""{ "supervision": ["later"] }""", Fit.Yes)]
+    [InlineData("""{ "supervision": ["direct", "none"] }""", Fit.No, "supervision", "supervision later is not among direct, none")]
+    [InlineData("""{ "assisted": false }""", Fit.Yes)]
+    [InlineData("""{ "assisted": true }""", Fit.No, "assisted", "unassisted")]
+    [InlineData("""{ "subtype": ["femoral"] }""", Fit.Yes)]
+    [InlineData("""{ "subtype": ["Femoral"] }""", Fit.No, "subtype", "subtype femoral is not among Femoral")]
+    [InlineData("""{ "read": true }""", Fit.Yes)]
+    [InlineData("""{ "read": false }""", Fit.Yes)]
+    [InlineData("""{ "quality": { "min": 3 } }""", Fit.Yes)]
+    [InlineData("""{ "quality": { "min": 4 } }""", Fit.No, "quality", "image quality below 4")]
+    [InlineData("""{ "views": true }""", Fit.Yes)]
+    [InlineData("""{ "views": false }""", Fit.No, "views", "all required views are adequate")]
+    [InlineData("""{ "result": ["TP", "TN"] }""", Fit.Yes)]
+    [InlineData("""{ "result": ["FN"] }""", Fit.No, "result", "result TP is not among FN")]
+    [InlineData("""{ "positive": true }""", Fit.Yes)]
+    [InlineData("""{ "positive": false }""", Fit.No, "positive", "result TP is not negative")]
+    [InlineData("""{ "positive": false, "assisted": true, "quality": { "min": 5 } }""", Fit.No, "assisted", "unassisted")]
+    public void A_read_scan_is_answered_with_yes_or_the_first_key_that_fails(string filter, Fit answer, string? key = null, string? words = null) =>
         Assert.Equal((answer, key, words), Ask(filter, Typical));
 
     [Theory]
-    [InlineData("{}", Answer.Open)]
-    [InlineData("""{ "read": false }""", Answer.Yes)]
-    [InlineData("""{ "read": false, "role": ["performed"] }""", Answer.Yes)]
-    [InlineData("""{ "read": false, "quality": { "min": 1 } }""", Answer.Open)]
-    [InlineData("""{ "read": false, "views": false }""", Answer.Open)]
-    [InlineData("""{ "read": false, "result": ["TP"] }""", Answer.Open)]
-    [InlineData("""{ "read": false, "positive": true }""", Answer.Open)]
-    [InlineData("""{ "quality": { "min": 5 }, "assisted": true }""", Answer.No, "assisted")]
-    public void An_unread_scan_stays_open_where_a_reading_may_decide(string filter, Answer answer, string? key = null)
+    [InlineData("{}", Fit.Open)]
+    [InlineData("""{ "read": false }""", Fit.Yes)]
+    [InlineData("""{ "read": false, "role": ["performed"] }""", Fit.Yes)]
+    [InlineData("""{ "read": false, "quality": { "min": 1 } }""", Fit.Open)]
+    [InlineData("""{ "read": false, "views": false }""", Fit.Open)]
+    [InlineData("""{ "read": false, "result": ["TP"] }""", Fit.Open)]
+    [InlineData("""{ "read": false, "positive": true }""", Fit.Open)]
+    [InlineData("""{ "quality": { "min": 5 }, "assisted": true }""", Fit.No, "assisted")]
+    public void An_unread_scan_stays_open_where_a_reading_may_decide(string filter, Fit answer, string? key = null)
     {
         var (given, failed, _) = Ask(filter, Unread);
         Assert.Equal((answer, key), (given, failed));
@@ -66,7 +66,7 @@ public sealed class FilterTests
     [InlineData("""{ "result": ["ID"] }""", "result", "no result given")]
     [InlineData("""{ "positive": false }""", "positive", "no result given")]
     public void A_read_scan_that_lacks_the_value_fails_at_its_key(string filter, string key, string words) =>
-        Assert.Equal((Answer.No, key, words), Ask(filter, Unread.As(null, null, null)));
+        Assert.Equal((Fit.No, key, words), Ask(filter, Unread.As(null, null, null)));
 
     [Theory] // positive holds where the truth is positive; ID is neither
     [InlineData(Result.TP, true)]
@@ -76,8 +76,8 @@ public sealed class FilterTests
     [InlineData(Result.ID, null)]
     public void Positive_is_the_truth_and_not_the_answer(Result result, bool? truth)
     {
-        Assert.Equal(truth == true, Ask("""{ "positive": true }""", Unread.As(result)).Answer == Answer.Yes);
-        Assert.Equal(truth == false, Ask("""{ "positive": false }""", Unread.As(result)).Answer == Answer.Yes);
+        Assert.Equal(truth == true, Ask("""{ "positive": true }""", Unread.As(result)).Answer == Fit.Yes);
+        Assert.Equal(truth == false, Ask("""{ "positive": false }""", Unread.As(result)).Answer == Fit.Yes);
     }
 
     [Theory]
@@ -110,7 +110,7 @@ public sealed class FilterTests
         Assert.Equal(own.Contains("read", StringComparison.Ordinal) ? null : false, counting.Read);
     }
 
-    private static (Answer Answer, string? Key, string? Words) Ask(string filter, ScanEvidence scan)
+    private static (Fit Answer, string? Key, string? Words) Ask(string filter, ScanEvidence scan)
     {
         var answer = Counting(filter).For(See(scan), out var failed);
         return (answer, failed?.Key, failed?.WhyNot(See(scan)));

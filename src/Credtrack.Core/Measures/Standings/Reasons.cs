@@ -12,7 +12,7 @@ public static class Reasons
         { Verdict: Verdict.Pending } => "waits for a reading",
         { Cap: { } cap } => $"over the cap: at most {cap.Where.Scans(cap.Max)} {(cap.Max == 1 ? "counts" : "count")}",
         { Failed: { } condition } => condition.WhyNot(finding.Seen),
-        { Introductory: { } first } => $"introductory: among the first {first}",
+        { Introductory: { } first } => first == 1 ? "introductory: the first one" : $"introductory: among the first {first}",
         { Earlier: not null } => "same encounter as an earlier scan",
         _ => "its application is not in the rulebook",
     };

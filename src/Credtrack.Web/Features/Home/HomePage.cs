@@ -10,13 +10,13 @@ public sealed record ToDoLine(Guid ScanId, string Application, DateTime Performe
 public sealed record ProgrammeLine(string Name, int Trainees, int Waiting, DateTime? OldestSince);
 
 /// <summary>What is to be done, each membership's part on its own; a part that does not concern the person is null.</summary>
-public sealed record HomePage(IReadOnlyList<ToDoLine>? ToDo, int Waiting, StandingLine? NearestGap, BenchQueue? Bench, IReadOnlyList<ProgrammeLine> Programmes)
+public sealed record HomePage(IReadOnlyList<ToDoLine>? ToDo, int Waiting, StandingLine? NearestGap, Bench? Bench, IReadOnlyList<ProgrammeLine> Programmes)
 {
     public static async Task<HomePage> Load(CredtrackDb db, Me me, DateOnly today)
     {
         var person = me.Person;
         var programmes = await Led(db, person, today);
-        var bench = person.Is(MembershipKind.Reader) ? await BenchQueue.Load(db, person) : null;
+        var bench = person.Is(MembershipKind.Reader) ? await Bench.Load(db, person) : null;
         if (!person.Is(MembershipKind.Trainee)) return new(null, 0, null, bench, programmes);
         var own = db.ScansVisibleTo(person).AsNoTracking().Where(s => s.TraineeId == person.Id && !s.Readings.Any());
         var open = await own.OrderByDescending(s => s.PerformedAt).Where(s => !s.Submissions.Any(x => x.Return == null)).Take(20)

@@ -9,7 +9,7 @@ public sealed class ReadingsController(CredtrackDb db, Me me) : Controller
     [HttpGet("")]
     public async Task<IActionResult> Index(Guid? read)
     {
-        var queue = await BenchQueue.Load(db, me.Person);
+        var queue = await Bench.Load(db, me.Person);
         if (queue.Next is not { } next) return View("Index", read);
         return LocalRedirect($"~/scans/{next}/readings/new{(read is null ? "" : $"?read={read}")}");
     }

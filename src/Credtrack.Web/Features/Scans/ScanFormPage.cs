@@ -4,6 +4,7 @@ using Credtrack.Core.Rulebooks;
 using Credtrack.Core.Scans;
 using Credtrack.Web.Features.Shared.Figures;
 using Credtrack.Web.Features.Standings;
+using Credtrack.Web.Features.Scans.Pictures;
 
 namespace Credtrack.Web.Features.Scans;
 
@@ -49,6 +50,6 @@ public sealed record ScanFormPage(
         return [.. from code in codes
                    join application in applications on code equals application.Code
                    let line = standing is null ? null : StandingLine.Of(standing, application.Code, application.Name)
-                   select new ApplicationTile(application, line?.Depth, line?.Said ?? "")];
+                   select new ApplicationTile(application, line?.Depth, line is null ? "" : line.Standing.Met ? "met" : line.Missing > 0 ? $"{line.Missing} missing" : line.Gap)];
     }
 }

@@ -22,12 +22,15 @@ public sealed record StandingLine(string Code, string Name, Depth? Depth, Applic
             var others = Standing.Requirements.Where(r => !r.Met && r.Asked is not Count { Where: null }).Select(Lacking).ToList();
             var first = Missing > 0 ? $"{Missing} missing" : Depth is null ? "not met" : "count reached";
             var cap = Depth?.OverCap > 0 ? $"{Depth.OverCap} over a cap" : null;
-            return string.Join("; ", new[] { first + waiting, .. others, cap }.OfType<string>());
+            string?[] said = [first + waiting, .. others, cap];
+            return string.Join("; ", said.OfType<string>());
         }
     }
 
-    /// <summary>"3 lung scans"; where the count is reached, the first condition that is open.</summary>
-    public string NearestGap => Missing > 0 ? $"{Missing} {Name} {(Missing == 1 ? "scan" : "scans")}" : $"{Name}: {Standing.Requirements.Where(r => !r.Met).Select(r => r.Lacks).FirstOrDefault() ?? "a scan that counts"}";
+    /// <summary>"3 scans"; where the count is reached, the first condition that is open.</summary>
+    public string Gap => Missing > 0 ? Missing.Of("scan") : Standing.Requirements.Where(r => !r.Met).Select(r => r.Lacks).FirstOrDefault() ?? "a scan that counts";
+
+    public string NearestGap => $"{Gap} in {Name}";
 
     /// <summary>What the waiting scans could do. Whether they count, their readings decide.</summary>
     public string Hope => (Missing, Standing.Pending) switch
@@ -39,7 +42,7 @@ public sealed record StandingLine(string Code, string Name, Depth? Depth, Applic
     };
 
     /// <summary>All that is asked beside the plain count, with what there is of it.</summary>
-    public IEnumerable<string> Conditions => Standing.Requirements.Where(r => r.Asked is not Count { Where: null }).Select(r => r.Met ? $"{r.Asks}: met" : $"{r.Asks}: {r.Lacks} missing");
+    public IEnumerable<string> Conditions => Standing.Requirements.Where(r => r.Asked is not Count { Where: null }).Select(r => r.Met ? $"{r.Asks}: met" : r.Missing is { } missing ? $"{r.Asks}: {missing} missing" : r.Lacks!);
 
     public static StandingLine Of(Standing standing, ApplicationStanding application, string name)
     {

@@ -30,7 +30,7 @@ internal sealed class DemoAnswers(int seed)
         new MachineSettings(null, Between(application.DepthFromMm, application.DepthToMm, 5), Between(application.FrequencyFromKhz, application.FrequencyToKhz, 100), chance.Next(6, 14) * 10, chance.Next(1, 8) * 10),
         Note: null,
         [.. application.Views.Where(_ => chance.Next(12) > 0).Select(v => v.Code)],
-        truth.ToDictionary(t => t.Key, t => Errs(0.10 - 0.07 * skill) ? Other(t.Value) : Errs(0.05) ? Answer.Unclear : t.Value));
+        truth.ToDictionary(t => t.Key, t => Errs(0.05 - 0.04 * skill) ? Other(t.Value) : Errs(0.02) ? Answer.Unclear : t.Value));
 
     public Judgement Judgement(Scan scan, Application application, Dictionary<string, Answer> truth, double skill) => new(
         application, scan.Subtype, scan.Indicated, scan.Assisted, scan.Supervision,

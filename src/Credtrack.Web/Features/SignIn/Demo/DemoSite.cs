@@ -51,7 +51,7 @@ public sealed class DemoSite(CredtrackDb db, PictureFiles pictures, DateTime now
     {
         for (var n = 0; n < names.Length; n++)
         {
-            var year = n * 3 / names.Length + 1;
+            var year = (n + 1) % 3 + 1; // the first of the list is in year 2
             var trainee = Member(names[n], programme, MembershipKind.Trainee, now.AddMonths(-4).AddYears(1 - year), $"year {year}");
             var away = DateOnly.FromDateTime(now.AddDays(-40 - 11 * n));
             if (n % 4 == 1) trainee.BeAway(director, programme, away, away.AddDays(20), now.AddDays(-60 - 11 * n));

@@ -236,7 +236,7 @@ namespace Credtrack.Migrations.PostgreSql.Migrations
                 });
 
             migrationBuilder.CreateTable(
-                name: "AspNetUserClaims",
+                name: "AccountClaims",
                 columns: table => new
                 {
                     Id = table.Column<int>(type: "integer", nullable: false)
@@ -247,9 +247,9 @@ namespace Credtrack.Migrations.PostgreSql.Migrations
                 },
                 constraints: table =>
                 {
-                    table.PrimaryKey("PK_AspNetUserClaims", x => x.Id);
+                    table.PrimaryKey("PK_AccountClaims", x => x.Id);
                     table.ForeignKey(
-                        name: "FK_AspNetUserClaims_Accounts_UserId",
+                        name: "FK_AccountClaims_Accounts_UserId",
                         column: x => x.UserId,
                         principalTable: "Accounts",
                         principalColumn: "Id",
@@ -257,7 +257,7 @@ namespace Credtrack.Migrations.PostgreSql.Migrations
                 });
 
             migrationBuilder.CreateTable(
-                name: "AspNetUserLogins",
+                name: "AccountLogins",
                 columns: table => new
                 {
                     LoginProvider = table.Column<string>(type: "character varying(200)", maxLength: 200, nullable: false),
@@ -267,9 +267,9 @@ namespace Credtrack.Migrations.PostgreSql.Migrations
                 },
                 constraints: table =>
                 {
-                    table.PrimaryKey("PK_AspNetUserLogins", x => new { x.LoginProvider, x.ProviderKey });
+                    table.PrimaryKey("PK_AccountLogins", x => new { x.LoginProvider, x.ProviderKey });
                     table.ForeignKey(
-                        name: "FK_AspNetUserLogins_Accounts_UserId",
+                        name: "FK_AccountLogins_Accounts_UserId",
                         column: x => x.UserId,
                         principalTable: "Accounts",
                         principalColumn: "Id",
@@ -277,7 +277,7 @@ namespace Credtrack.Migrations.PostgreSql.Migrations
                 });
 
             migrationBuilder.CreateTable(
-                name: "AspNetUserTokens",
+                name: "AccountTokens",
                 columns: table => new
                 {
                     UserId = table.Column<Guid>(type: "uuid", nullable: false),
@@ -287,9 +287,9 @@ namespace Credtrack.Migrations.PostgreSql.Migrations
                 },
                 constraints: table =>
                 {
-                    table.PrimaryKey("PK_AspNetUserTokens", x => new { x.UserId, x.LoginProvider, x.Name });
+                    table.PrimaryKey("PK_AccountTokens", x => new { x.UserId, x.LoginProvider, x.Name });
                     table.ForeignKey(
-                        name: "FK_AspNetUserTokens_Accounts_UserId",
+                        name: "FK_AccountTokens_Accounts_UserId",
                         column: x => x.UserId,
                         principalTable: "Accounts",
                         principalColumn: "Id",
@@ -328,8 +328,7 @@ namespace Credtrack.Migrations.PostgreSql.Migrations
                     Height = table.Column<int>(type: "integer", nullable: false),
                     At = table.Column<DateTime>(type: "timestamp with time zone", nullable: false),
                     RemovedById = table.Column<Guid>(type: "uuid", nullable: true),
-                    RemovedAt = table.Column<DateTime>(type: "timestamp with time zone", nullable: true),
-                    ScanId1 = table.Column<Guid>(type: "uuid", nullable: true)
+                    RemovedAt = table.Column<DateTime>(type: "timestamp with time zone", nullable: true)
                 },
                 constraints: table =>
                 {
@@ -343,12 +342,6 @@ namespace Credtrack.Migrations.PostgreSql.Migrations
                     table.ForeignKey(
                         name: "FK_Pictures_Scans_ScanId",
                         column: x => x.ScanId,
-                        principalTable: "Scans",
-                        principalColumn: "Id",
-                        onDelete: ReferentialAction.Restrict);
-                    table.ForeignKey(
-                        name: "FK_Pictures_Scans_ScanId1",
-                        column: x => x.ScanId1,
                         principalTable: "Scans",
                         principalColumn: "Id",
                         onDelete: ReferentialAction.Restrict);
@@ -473,6 +466,16 @@ namespace Credtrack.Migrations.PostgreSql.Migrations
                 });
 
             migrationBuilder.CreateIndex(
+                name: "IX_AccountClaims_UserId",
+                table: "AccountClaims",
+                column: "UserId");
+
+            migrationBuilder.CreateIndex(
+                name: "IX_AccountLogins_UserId",
+                table: "AccountLogins",
+                column: "UserId");
+
+            migrationBuilder.CreateIndex(
                 name: "EmailIndex",
                 table: "Accounts",
                 column: "NormalizedEmail");
@@ -488,16 +491,6 @@ namespace Credtrack.Migrations.PostgreSql.Migrations
                 table: "Applications",
                 column: "Code",
                 unique: true);
-
-            migrationBuilder.CreateIndex(
-                name: "IX_AspNetUserClaims_UserId",
-                table: "AspNetUserClaims",
-                column: "UserId");
-
-            migrationBuilder.CreateIndex(
-                name: "IX_AspNetUserLogins_UserId",
-                table: "AspNetUserLogins",
-                column: "UserId");
 
             migrationBuilder.CreateIndex(
                 name: "IX_Leaves_MembershipId",
@@ -525,11 +518,6 @@ namespace Credtrack.Migrations.PostgreSql.Migrations
                 table: "Pictures",
                 columns: new[] { "ScanId", "Number" },
                 unique: true);
-
-            migrationBuilder.CreateIndex(
-                name: "IX_Pictures_ScanId1",
-                table: "Pictures",
-                column: "ScanId1");
 
             migrationBuilder.CreateIndex(
                 name: "IX_Pictures_Sha256",
@@ -615,13 +603,13 @@ namespace Credtrack.Migrations.PostgreSql.Migrations
         protected override void Down(MigrationBuilder migrationBuilder)
         {
             migrationBuilder.DropTable(
-                name: "AspNetUserClaims");
+                name: "AccountClaims");
 
             migrationBuilder.DropTable(
-                name: "AspNetUserLogins");
+                name: "AccountLogins");
 
             migrationBuilder.DropTable(
-                name: "AspNetUserTokens");
+                name: "AccountTokens");
 
             migrationBuilder.DropTable(
                 name: "Leaves");

@@ -13,7 +13,7 @@ using Npgsql.EntityFrameworkCore.PostgreSQL.Metadata;
 namespace Credtrack.Migrations.PostgreSql.Migrations
 {
     [DbContext(typeof(CredtrackDb))]
-    [Migration("20261201140213_Initial")]
+    [Migration("20261201142235_Initial")]
     partial class Initial
     {
         /// <inheritdoc />
@@ -359,9 +359,6 @@ namespace Credtrack.Migrations.PostgreSql.Migrations
                     b.Property<Guid>("ScanId")
                         .HasColumnType("uuid");
 
-                    b.Property<Guid?>("ScanId1")
-                        .HasColumnType("uuid");
-
                     b.Property<string>("Sha256")
                         .IsRequired()
                         .HasMaxLength(64)
@@ -373,8 +370,6 @@ namespace Credtrack.Migrations.PostgreSql.Migrations
                     b.HasKey("Id");
 
                     b.HasIndex("RemovedById");
-
-                    b.HasIndex("ScanId1");
 
                     b.HasIndex("Sha256");
 
@@ -687,7 +682,7 @@ namespace Credtrack.Migrations.PostgreSql.Migrations
 
                     b.HasIndex("UserId");
 
-                    b.ToTable("AspNetUserClaims", (string)null);
+                    b.ToTable("AccountClaims", (string)null);
                 });
 
             modelBuilder.Entity("Microsoft.AspNetCore.Identity.IdentityUserLogin<System.Guid>", b =>
@@ -711,7 +706,7 @@ namespace Credtrack.Migrations.PostgreSql.Migrations
 
                     b.HasIndex("UserId");
 
-                    b.ToTable("AspNetUserLogins", (string)null);
+                    b.ToTable("AccountLogins", (string)null);
                 });
 
             modelBuilder.Entity("Microsoft.AspNetCore.Identity.IdentityUserToken<System.Guid>", b =>
@@ -733,7 +728,7 @@ namespace Credtrack.Migrations.PostgreSql.Migrations
 
                     b.HasKey("UserId", "LoginProvider", "Name");
 
-                    b.ToTable("AspNetUserTokens", (string)null);
+                    b.ToTable("AccountTokens", (string)null);
                 });
 
             modelBuilder.Entity("Credtrack.Core.People.Leave", b =>
@@ -810,11 +805,6 @@ namespace Credtrack.Migrations.PostgreSql.Migrations
                         .HasForeignKey("ScanId")
                         .OnDelete(DeleteBehavior.Restrict)
                         .IsRequired();
-
-                    b.HasOne("Credtrack.Core.Scans.Scan", null)
-                        .WithMany("ShownPictures")
-                        .HasForeignKey("ScanId1")
-                        .OnDelete(DeleteBehavior.Restrict);
                 });
 
             modelBuilder.Entity("Credtrack.Core.Scans.Return", b =>
@@ -943,8 +933,6 @@ namespace Credtrack.Migrations.PostgreSql.Migrations
                     b.Navigation("Pictures");
 
                     b.Navigation("Readings");
-
-                    b.Navigation("ShownPictures");
 
                     b.Navigation("Submissions");
 

@@ -3,7 +3,7 @@ using Credtrack.Core.Scans;
 namespace Credtrack.Web.Features.Readings;
 
 /// <summary>What waits for a reader, oldest first, and where in it a scan stands. A scan that does not wait stands before the first.</summary>
-public sealed record BenchQueue(int Position, int Length, DateTime? OldestSince, Guid? Next)
+public sealed record Bench(int Position, int Length, DateTime? OldestSince, Guid? Next)
 {
     private sealed record Waiting
     {
@@ -11,7 +11,7 @@ public sealed record BenchQueue(int Position, int Length, DateTime? OldestSince,
         public required DateTime Since { get; init; }
     }
 
-    public static async Task<BenchQueue> Load(CredtrackDb db, Person reader, Scan? at = null)
+    public static async Task<Bench> Load(CredtrackDb db, Person reader, Scan? at = null)
     {
         var queue = InOrder(db, reader);
         var since = at?.WaitsSince;
