@@ -1,7 +1,7 @@
 namespace Credtrack.Web.Features.SignIn.Demo;
 
 /// <summary>Names invented for the demonstration; whoever bears one by chance is not meant.</summary>
-internal static class DemoNames
+public static class DemoNames
 {
     public static string[] EmergencyTrainees { get; } =
     [
