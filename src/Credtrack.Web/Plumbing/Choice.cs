@@ -33,9 +33,9 @@ public sealed class Choice : TagHelper
         output.Content.AppendHtml("<span>").AppendHtml(words).AppendHtml("</span>");
     }
 
-    private bool IsChosen()
-    {
-        if (!HttpMethods.IsPost(View.HttpContext.Request.Method)) return Chosen;
-        return View.HttpContext.Request.Form[Name].Contains(Value);
-    }
+    private bool IsChosen() => IsChosen(View, Name, Value, Chosen);
+
+    /// <summary>What was sent with this request, or else what the page holds.</summary>
+    public static bool IsChosen(ViewContext view, string name, string value, bool held) =>
+        HttpMethods.IsPost(view.HttpContext.Request.Method) ? view.HttpContext.Request.Form[name].Contains(value) : held;
 }

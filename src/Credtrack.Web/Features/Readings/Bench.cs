@@ -2,7 +2,7 @@ using Credtrack.Core.Scans;
 
 namespace Credtrack.Web.Features.Readings;
 
-/// <summary>What waits for a reader, oldest first, and where in it a scan stands. A scan that does not wait stands before the first.</summary>
+/// <summary>What waits for a reader, oldest first, and where in it a scan stands. A scan that does not wait for this reader has no place in it.</summary>
 public sealed record Bench(int Position, int Length, DateTime? OldestSince, Guid? Next)
 {
     private sealed record Waiting
@@ -14,13 +14,11 @@ public sealed record Bench(int Position, int Length, DateTime? OldestSince, Guid
     public static async Task<Bench> Load(CredtrackDb db, Person reader, Scan? at = null)
     {
         var queue = InOrder(db, reader);
-        var since = at?.WaitsSince;
-        var length = await queue.CountAsync();
-        var oldest = await queue.FirstOrDefaultAsync();
-        if (since is null) return new(0, length, oldest?.Since, oldest?.Id);
+        var (length, oldest) = (await queue.CountAsync(), await queue.FirstOrDefaultAsync());
+        if (at?.WaitsSince is not { } since || !await queue.AnyAsync(w => w.Id == at.Id)) return new(0, length, oldest?.Since, oldest?.Id);
         var before = await queue.CountAsync(w => w.Since < since);
-        var next = await queue.Where(w => w.Since >= since && w.Id != at!.Id).FirstOrDefaultAsync();
-        return new(before + 1, length, oldest?.Since, next?.Id ?? (oldest?.Id == at!.Id ? null : oldest?.Id));
+        var next = await queue.Where(w => w.Since >= since && w.Id != at.Id).FirstOrDefaultAsync();
+        return new(before + 1, length, oldest!.Since, next?.Id ?? (oldest.Id == at.Id ? null : oldest.Id));
     }
 
     private static IQueryable<Waiting> InOrder(CredtrackDb db, Person reader) => db.ScansWaitingFor(reader)

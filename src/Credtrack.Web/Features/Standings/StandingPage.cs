@@ -22,8 +22,9 @@ public sealed record StandingPage(
     public IEnumerable<(string Name, RequirementStanding Requirement)> Together =>
         [.. Standing!.Groups.SelectMany(g => g.Requirements.Select(r => (g.Name, r))), .. Standing.Overall.Requirements.Select(r => ("All together", r))];
 
+    /// <summary>By verdict only what is open: being on such a list would tell what came of a reading.</summary>
     public IReadOnlyList<TraceLine> Matching =>
-        [.. Trace.Where(t => (Query.Verdict is null || t.Finding.Verdict == Query.Verdict) && (Query.Application is null || t.Finding.Application == Query.Application))];
+        [.. Trace.Where(t => (Query.Verdict is null || (!t.IsClosed && t.Finding.Verdict == Query.Verdict)) && (Query.Application is null || t.Finding.Application == Query.Application))];
 
     public static async Task<StandingPage?> Load(CredtrackDb db, Me me, Guid personId, StandingQuery query, DateOnly today)
     {
