@@ -13,7 +13,7 @@ public sealed record SignInPage(SignInForm Form, IReadOnlyList<DemoPeople> Demo,
     {
         if (!settings.Demo) return new(form, [], null);
         var rows = await db.People.SelectMany(p => p.Memberships, (p, m) => new { p.Id, p.Name, m.Kind, m.YearGroup, Programme = m.Programme.Name }).ToListAsync();
-        var groups = from kind in new[] { MembershipKind.Trainee, MembershipKind.Reader, MembershipKind.Director, MembershipKind.Coordinator }
+        var groups = from kind in Enum.GetValues<MembershipKind>()
                      let lines = from person in rows.Where(r => r.Kind == kind).OrderBy(r => r.YearGroup).ThenBy(r => r.Name)
                                  group person by person.Id into one
                                  select new DemoPersonLine(one.Key, one.First().Name, string.Join("; ", one.Select(r => r.YearGroup is null ? r.Programme : $"{r.YearGroup}, {r.Programme}")))

@@ -69,6 +69,6 @@ public sealed class BenchTests(RunningSite site) : IClassFixture<RunningSite>
         for (var more = 0; more < 6; more++) await world.Waiting();
         using var reader = await world.As(world.Reader);
         var asked = await site.Queries.During(() => reader.Opens($"/scans/{first.Id}/readings/new"));
-        Assert.True(asked.Count <= 8, $"{asked.Count} queries:\n{string.Join("\n\n", asked)}");
+        Assert.True(asked.Count <= 5, $"{asked.Count} queries:\n{string.Join("\n\n", asked)}");
     }
 }
