@@ -9,11 +9,10 @@ public sealed class PictureFiles(string folder)
     private const UnixFileMode OwnersFile = UnixFileMode.UserRead | UnixFileMode.UserWrite;
     private const UnixFileMode OwnersFolder = OwnersFile | UnixFileMode.UserExecute;
 
-    /// <summary>Stores the still; when the task ends, its bytes are on the disk. Storing it again changes nothing.</summary>
+    /// <summary>Stores the still; when the task ends, its bytes are on the disk. Storing it again changes nothing but its age.</summary>
     public async Task Keep(StillImage still)
     {
         var path = PathOf(still.Sha256);
-        if (File.Exists(path)) return;
         // One after the other: only the last folder of a path gets the permissions asked for.
         MakeFolder(folder);
         MakeFolder(Path.GetDirectoryName(path)!);
@@ -48,6 +47,17 @@ public sealed class PictureFiles(string folder)
     {
         var path = PathOf(sha256);
         if (File.Exists(path)) File.Delete(path);
+    }
+
+    /// <summary>The names of the stills written before an instant. What a killed process left unfinished before then is removed on the way.</summary>
+    public IEnumerable<string> OlderThan(DateTime utc)
+    {
+        if (!Directory.Exists(folder)) yield break;
+        foreach (var path in Directory.EnumerateFiles(folder, "*", SearchOption.AllDirectories).Where(path => File.GetLastWriteTimeUtc(path) < utc))
+        {
+            if (path.EndsWith(".jpg", StringComparison.Ordinal)) yield return Path.GetFileNameWithoutExtension(path);
+            else File.Delete(path);
+        }
     }
 
     private string PathOf(string sha256) => sha256.Length == 64 && sha256.All(char.IsAsciiHexDigitLower)
