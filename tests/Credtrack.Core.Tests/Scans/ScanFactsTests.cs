@@ -1,3 +1,4 @@
+using System.Globalization;
 using System.Text.Json;
 using Credtrack.Core.Scans;
 
@@ -47,6 +48,24 @@ public sealed class ScanFactsTests
         var scan = cast.Waiting();
         scan.SendBack(cast.Reader, "More.", Cast.Noon.AddHours(1));
         Assert.Equal((cast.Reader, Cast.Noon.AddHours(1)), (scan.NewFacts[^1].By, scan.NewFacts[^1].At));
+    }
+
+    [Fact] // Thai years are 543 ahead, and Finnish writes the time with a point
+    public void The_ledger_reads_alike_wherever_the_server_stands()
+    {
+        var (scan, here) = (cast.Draft(pictures: 0), CultureInfo.CurrentCulture);
+        try
+        {
+            foreach (var culture in new[] { "th-TH", "fi-FI", "en-US" })
+            {
+                CultureInfo.CurrentCulture = CultureInfo.GetCultureInfo(culture);
+                Assert.Equal("Tariq logged a scan (Focused cardiac) performed at 2026-03-01 11:00 UTC.", scan.NewFacts[0].Sentence);
+            }
+        }
+        finally
+        {
+            CultureInfo.CurrentCulture = here;
+        }
     }
 
     [Fact]
