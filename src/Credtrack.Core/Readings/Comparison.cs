@@ -18,13 +18,14 @@ public sealed record Comparison(string Code, string Text, Answer? Trainee, Answe
     /// </summary>
     public static Result Together(ApplicationKind kind, IEnumerable<Answered> trainee, IEnumerable<Answered> reader)
     {
-        if (kind == ApplicationKind.Procedure) return Reached(reader);
+        if (kind == ApplicationKind.Procedure) return Reached(trainee, reader);
         var settled = Of(trainee, reader).Select(c => c.Cell).OfType<Result>().ToHashSet();
         Result[] strongestFirst = [Result.FN, Result.FP, Result.ID, Result.TP, Result.TN];
         return settled.Count == 0 ? Result.ID : strongestFirst.First(settled.Contains);
     }
 
-    private static Result Reached(IEnumerable<Answered> reader) => reader.FirstOrDefault(a => a.Code == Question.TargetReached)?.Given switch
+    // Asked of both, although the reader's answer alone decides: a diagnostic scan that a reader corrects to a procedure was no try at a target.
+    private static Result Reached(IEnumerable<Answered> trainee, IEnumerable<Answered> reader) => Of(trainee, reader).FirstOrDefault(c => c.Code == Question.TargetReached)?.Reader switch
     {
         Answer.Yes => Result.TP,
         Answer.No => Result.FN,

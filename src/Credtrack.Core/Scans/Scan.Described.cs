@@ -9,7 +9,7 @@ public sealed partial class Scan
     [
         ("application", ApplicationId.ToString()),
         ("part", Subtype ?? "none"),
-        ("time performed", PerformedAt.ToString("yyyy-MM-dd HH:mm 'UTC'", CultureInfo.InvariantCulture)),
+        ("time performed", PerformedAt.ToString("yyyy-MM-dd HH:mm:ss.FFF 'UTC'", CultureInfo.InvariantCulture)),
         ("role", Role.ToString()),
         ("setting", Setting.ToString()),
         ("clinically indicated", Said(Indicated)),

@@ -117,7 +117,7 @@ public sealed class TraceTests
             """);
         var standing = rules.On(Book.Scan("a", 1) with { Encounter = "e" }, Book.Scan("b", 2) with { Encounter = "e" }, Book.Scan("c", 3), Book.Scan("d", 4).As(null, 2),
             Book.Scan("f", 5).As(null) with { Setting = Setting.Education }, Book.Scan("g", 6).As(null) with { Setting = Setting.Education }, Book.Scan("h", 7) with { Application = "x" });
-        Assert.Equal(["introductory: among the first 1", "same encounter as an earlier scan", "waits for a reading", "image quality below 3", null,
+        Assert.Equal(["introductory: the first one", "same encounter as an earlier scan", "waits for a reading", "image quality below 3", null,
             "over the cap: at most 1 teaching scan counts", "its application is not in the rulebook"], standing.Findings.Select(f => f.Words()));
         Assert.Equal(("t", 1L), (standing.Findings[5].Cap!.Label, standing.Findings[5].Cap!.Max));
     }
