@@ -1,3 +1,4 @@
+using Credtrack.Core.Grants;
 using Credtrack.Core.Measures.Standings;
 using Credtrack.Core.Rulebooks;
 
@@ -6,10 +7,26 @@ namespace Credtrack.Web.Features.Standings;
 /// <summary>AsOf: the day; Programme: under whose rulebook; the rest picks from the list of scans.</summary>
 public sealed record StandingQuery(DateOnly? AsOf, Guid? Programme, Verdict? Verdict, string? Application, int Shown = 50);
 
+/// <summary>A grant that stands or waits, with its sealed paper.</summary>
+public sealed record GrantedLine(Guid Id, string Privilege, GrantState State, DateTime? SignedAt, Guid? DocumentId)
+{
+    public static async Task<IReadOnlyList<GrantedLine>> Load(CredtrackDb db, Person viewer, Guid holderId)
+    {
+        var rows = await db.GrantsVisibleTo(viewer).AsNoTracking().Where(g => g.HolderId == holderId).OrderByDescending(g => g.ProposedAt).Take(50)
+            .Select(g => new { Grant = g, DocumentId = g.Documents.Select(d => (Guid?)d.Id).FirstOrDefault() }).ToListAsync();
+        return [.. rows.Select(r => new GrantedLine(r.Grant.Id, r.Grant.Privilege, r.Grant.State, r.Grant.Signature?.At, r.DocumentId))];
+    }
+}
+
 public sealed record StandingPage(
     Person Trainee, Rulebook? Rulebook, IReadOnlyList<Membership> Programmes, Membership Membership, DateOnly AsOf, DateOnly Today, StandingQuery Query,
     Standing? Standing, IReadOnlyList<StandingLine> Lines, IReadOnlyList<TraceLine> Trace, int Elsewhere)
 {
+    public IReadOnlyList<GrantedLine> Grants { get; private init; } = [];
+
+    /// <summary>Whether the viewer may propose a grant from here.</summary>
+    public bool Proposes { get; private init; }
+
     public string Address => $"~/standings/{Trainee.Id}?asOf={AsOf.Iso()}&programme={Membership.ProgrammeId}";
     public int Counting => Standing!.Findings.Count(f => f.Verdict == Verdict.Counts);
     public int Pending => Standing!.Findings.Count(f => f.Verdict == Verdict.Pending);
@@ -40,7 +57,11 @@ public sealed record StandingPage(
         var trace = await TraceLine.Load(db, me.Person, personId, standing, names);
         return new(trainee, rulebook, programmes, membership, asOf, today, query, standing,
             [.. standing.Applications.Select(a => StandingLine.Of(standing, a, a.Rules.Name ?? names.GetValueOrDefault(a.Code, a.Code)))],
-            trace, standing.Findings.Count - trace.Count);
+            trace, standing.Findings.Count - trace.Count)
+        {
+            Grants = await GrantedLine.Load(db, me.Person, personId),
+            Proposes = personId != me.Person.Id && me.Person.Is(MembershipKind.Director, membership.ProgrammeId),
+        };
     }
 
     // A year that no calendar of scans has would only make the arithmetic of days overflow.

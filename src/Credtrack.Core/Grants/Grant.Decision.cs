@@ -1,0 +1,54 @@
+using Credtrack.Core.People;
+
+namespace Credtrack.Core.Grants;
+
+public sealed partial class Grant
+{
+    public string? WhyNotSign(Person by) =>
+          by.Id == HolderId                             ? "Nobody signs their own privilege."
+        : !by.Is(MembershipKind.Director, ProgrammeId)  ? "Only this programme's director signs."
+        : State == GrantState.Proposed                  ? null
+        : State == GrantState.Declined                  ? "This proposal was declined."
+        : State == GrantState.Ended                     ? "This grant has ended."
+        :                                                 "This privilege is already signed.";
+
+    /// <summary>A gap never blocks: people decide. It asks for a reason, which the paper prints.</summary>
+    public void Sign(Person by, Statement statement, Meaning meaning, string? gapReason, DateTime at)
+    {
+        RuleBroken.If(WhyNotSign(by) ?? (statement.Gaps.Count > 0 && string.IsNullOrWhiteSpace(gapReason) ? "Requirements are not met: say why you sign all the same." : null));
+        var signature = new Signature(this, by, statement, meaning, statement.Gaps.Count > 0 ? gapReason : null, at);
+        signatures.Add(signature);
+        Record(new GrantSigned(by, at, Privilege, meaning, signature.Digest));
+    }
+
+    public string? WhyNotDecline(Person by) => WhyNotSign(by) is { } why ? why.Replace("signs", "declines", StringComparison.Ordinal) : null;
+
+    public void TurnDown(Person by, string reason, DateTime at)
+    {
+        RuleBroken.If(WhyNotDecline(by));
+        Decline = new Decline(this, by, reason, at);
+        Record(new GrantDeclined(by, at));
+    }
+
+    public string? WhyNotEnd(Person by) =>
+          by.Id == HolderId                             ? "Nobody ends their own privilege here; ask your programme's director."
+        : !by.Is(MembershipKind.Director, ProgrammeId)  ? "Only this programme's director ends a grant."
+        : State == GrantState.Active                    ? null
+        : State == GrantState.Ended                     ? "This grant has ended already."
+        :                                                 "Only a grant that was signed can be ended.";
+
+    public void End(Person by, string reason, DateTime at)
+    {
+        RuleBroken.If(WhyNotEnd(by));
+        Ending = new Ending(this, by, reason, at);
+        Record(new GrantEnded(by, at));
+    }
+
+    /// <summary>Keeps the sealed paper as it left the house. Nothing is made twice.</summary>
+    public void Issue(Person by, string code, byte[] bytes, string sha256, DateTime at)
+    {
+        RuleBroken.If(State != GrantState.Active ? "Only a signed grant has a summary." : documents.Count > 0 ? "The summary of this grant is issued already." : null);
+        documents.Add(new Document(this, code, bytes, sha256, at));
+        Record(new DocumentIssued(by, at, sha256));
+    }
+}

@@ -1,0 +1,10 @@
+namespace Credtrack.Web.Features.Documents.Checks;
+
+public sealed record CheckPage(CheckForm Form, CheckAnswer? Answer, string Site, TimeZoneInfo Zone, DateTime Now)
+{
+    public static async Task<CheckPage> Load(CredtrackDb db, CheckForm form, CheckAnswer? answer, DateTime now)
+    {
+        var site = await db.Sites.AsNoTracking().SingleOrDefaultAsync();
+        return new(form, answer, site?.Name ?? "this site", TimeZoneInfo.FindSystemTimeZoneById(site?.TimeZone ?? "UTC"), now);
+    }
+}

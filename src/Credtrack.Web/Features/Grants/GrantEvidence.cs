@@ -1,0 +1,33 @@
+using System.Globalization;
+using Credtrack.Core.Grants;
+using Credtrack.Core.Measures.Standings;
+using Credtrack.Web.Features.Standings;
+
+namespace Credtrack.Web.Features.Grants;
+
+/// <summary>What there is on a day for one grant: the standing of its application, and the text that would be signed over it.</summary>
+public sealed record GrantEvidence(Grant Grant, string Holder, string Application, string Code, ApplicationStanding? Standing, Statement Statement)
+{
+    public static async Task<GrantEvidence> Load(CredtrackDb db, Site site, Grant grant, DateOnly today)
+    {
+        var names = await db.Grants.Where(g => g.Id == grant.Id)
+            .Select(g => new { Holder = g.Holder.Name, Programme = g.Programme.Name, Application = g.Application.Name, g.Application.Code }).SingleAsync();
+        var rulebook = await db.RulebookInForce(grant.ProgrammeId);
+        var evidence = (await db.EvidenceOf([grant.HolderId]))[grant.HolderId];
+        var rules = RulesOf.InForce(rulebook, site);
+        var standing = rules is null ? null : Standing.Of(rules, evidence, [], today);
+        var application = standing?.Applications.FirstOrDefault(a => a.Code == names.Code);
+        var findings = standing?.Findings.Where(f => f.Application == names.Code).ToList() ?? [];
+        var statement = new Statement(site.Name, names.Holder, grant.HolderId, names.Programme, grant.Privilege, names.Application, today,
+            findings.Count, findings.Count(f => f.Seen.IsRead), findings.Count(f => f.Verdict == Verdict.Counts),
+            Requirements(application), rulebook?.Name ?? "none", rulebook?.Edition ?? 0, Statement.Seal(findings));
+        return new(grant, names.Holder, names.Application, names.Code, application, statement);
+    }
+
+    private static List<Evidenced> Requirements(ApplicationStanding? application) => application is null
+        ? [new("a rulebook that lists this application", "none does", false)]
+        : [.. application.Requirements.Select(r => new Evidenced(r.Asks, Value(r), r.Met))];
+
+    private static string Value(RequirementStanding requirement) => requirement.Value is not { } value ? "nothing to take it from"
+        : requirement.Missing is not null ? value.ToString(CultureInfo.InvariantCulture) : $"{(value * 100).ToString("0.#", CultureInfo.InvariantCulture)} %";
+}

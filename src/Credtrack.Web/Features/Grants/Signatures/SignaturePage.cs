@@ -1,0 +1,27 @@
+using Credtrack.Core.Grants;
+using Credtrack.Core.Measures.Standings;
+
+namespace Credtrack.Web.Features.Grants.Signatures;
+
+public sealed record SignaturePage(GrantEvidence Evidence, string ProposedBy, string? WhyNot, SignatureForm Form)
+{
+    public Grant Grant => Evidence.Grant;
+    public Statement Statement => Evidence.Statement;
+
+    /// <summary>What moved since the text was shown; empty if nothing did.</summary>
+    public IReadOnlyList<(string Was, string Is)> Moved { get; init; } = [];
+
+    /// <summary>Where the scans behind a value are.</summary>
+    public string Scans(Verdict? verdict) =>
+        $"~/standings/{Grant.HolderId}?asOf={Statement.AsOf:yyyy-MM-dd}&programme={Grant.ProgrammeId}&application={Evidence.Code}{(verdict is null ? "" : $"&verdict={verdict}")}#scans";
+
+    public static async Task<SignaturePage?> Load(CredtrackDb db, Me me, Guid grantId, SignatureForm form, DateOnly today)
+    {
+        var row = await db.GrantsVisibleTo(me.Person).AsNoTracking().Where(g => g.Id == grantId).Select(g => new { Grant = g, ProposedBy = g.ProposedBy.Name }).SingleOrDefaultAsync();
+        if (row is null) return null;
+        var evidence = await GrantEvidence.Load(db, me.Site, row.Grant, today);
+        var moved = form.Digest is not null && form.Digest != evidence.Statement.Digest ? Statement.Difference(form.Shown ?? "", evidence.Statement.Text) : [];
+        (form.Version, form.Digest, form.Shown) = (row.Grant.Version, evidence.Statement.Digest, evidence.Statement.Text);
+        return new(evidence, row.ProposedBy, row.Grant.WhyNotSign(me.Person), form) { Moved = moved };
+    }
+}

@@ -1,0 +1,29 @@
+using Credtrack.Web.Features.Documents;
+using Microsoft.AspNetCore.Identity;
+
+namespace Credtrack.Web.Features.Grants.Signatures;
+
+[Route("grants/{grantId:guid}/signatures")]
+[Members(MembershipKind.Director)]
+public sealed class SignaturesController(CredtrackDb db, Me me, TimeProvider clock, Issuing issuing) : Controller
+{
+    [HttpGet("new")]
+    public async Task<IActionResult> New(Guid grantId) =>
+        await SignaturePage.Load(db, me, grantId, new SignatureForm(), me.Today(clock)) is { } page ? View("New", page) : NotFound();
+
+    [HttpPost("")]
+    public async Task<IActionResult> Create(Guid grantId, SignatureForm form, [FromServices] UserManager<Account> accounts)
+    {
+        if (await db.GrantsVisibleTo(me.Person).Find(grantId) is not { } grant) return NotFound();
+        var version = form.Version;
+        var page = (await SignaturePage.Load(db, me, grantId, form, me.Today(clock)))!;
+        if (page.Moved.Count > 0) return this.Moved("New", page);
+        if (page.WhyNot is null) await form.Judge(page, accounts, me.Person, ModelState);
+        if (page.WhyNot is null && !ModelState.IsValid) return this.Again("New", page);
+        db.Seen(grant, version);
+        grant.Sign(me.Person, page.Statement, form.Meaning ?? default, form.GapReason, clock.UtcNow());
+        await issuing.Issue(grant, page.Statement, me);
+        await db.SaveChangesAsync();
+        return this.Done($"~/grants/{grantId}", "Signed and sealed");
+    }
+}
