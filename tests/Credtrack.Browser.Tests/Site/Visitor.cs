@@ -40,7 +40,10 @@ public sealed partial class Visitor : IAsyncDisposable
 
     public Task Opens(string url) => Page.GotoAsync(url);
 
-    public Task Presses(string button) => Press(Page.GetByRole(AriaRole.Button, new() { Name = button, Exact = true }));
+    public Task Presses(string button) => Press(Page.GetByRole(AriaRole.Button, new() { Name = button }));
+
+    /// <summary>By the navigation at the top.</summary>
+    public Task GoesTo(string place) => Press(Page.GetByRole(AriaRole.Navigation, new() { Name = "Main" }).GetByRole(AriaRole.Link, new() { Name = place, Exact = true }));
 
     public Task Follows(string link) => Press(Page.GetByRole(AriaRole.Link, new() { Name = link, Exact = true }));
 
@@ -49,18 +52,21 @@ public sealed partial class Visitor : IAsyncDisposable
     /// <summary>Opens what is folded away behind these words.</summary>
     public Task Unfolds(string words) => Press(Page.GetByText(words));
 
-    /// <summary>From the tiles of recent ones or from the list of all, which is unfolded for it.</summary>
+    public Task UnfoldsApplications() => Press(Page.GetByText(AllApplications()));
+
+    /// <summary>From the tiles of recent ones or from the list of all, which is unfolded for it and folds up afterwards.</summary>
     public async Task ChoosesApplication(string name)
     {
-        await Press(Page.GetByText(AllApplications()));
-        await Chooses(name);
+        await UnfoldsApplications();
+        await Press(Radio(name));
+        await Expect(Page.GetByRole(AriaRole.Radio, new() { Name = name, IncludeHidden = true })).ToBeCheckedAsync();
     }
 
     public Task Chooses(string radio, string? within = null) => Check(AriaRole.Radio, radio, within);
 
     public Task Ticks(string box) => Check(AriaRole.Checkbox, box, null);
 
-    public Task Types(string label, string text) => Page.GetByLabel(label).FillAsync(text);
+    public Task Types(string label, string text) => Page.GetByLabel(label, new() { Exact = true }).FillAsync(text);
 
     public Task Attaches(params FilePayload[] files) => Page.GetByLabel("Attach images").SetInputFilesAsync(files);
 
