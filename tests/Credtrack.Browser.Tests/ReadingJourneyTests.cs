@@ -13,7 +13,7 @@ public sealed class ReadingJourneyTests(Demonstration site)
         await using var visitor = await site.Visit(Screen.Phone, "Wrenna Ostholm");
         var before = await Count(visitor);
 
-        await visitor.Follows("Log a scan");
+        await visitor.GoesTo("Log a scan");
         await visitor.ChoosesApplication(Application);
         await visitor.Ticks("Long axis with liver");
         await visitor.Chooses("No", "Small and collapsing with breathing?");
@@ -51,7 +51,7 @@ public sealed class ReadingJourneyTests(Demonstration site)
     /// <summary>The count of the application on the trainee's own standing.</summary>
     private static async Task<int> Count(Visitor visitor)
     {
-        await visitor.Follows("Standing");
+        await visitor.GoesTo("Standing");
         var count = Row(visitor, Application).GetByRole(AriaRole.Cell).Nth(1);
         return int.Parse(await count.InnerTextAsync(), CultureInfo.InvariantCulture);
     }
