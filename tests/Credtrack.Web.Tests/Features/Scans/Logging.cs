@@ -63,6 +63,13 @@ internal static class Logging
         return visitor;
     }
 
+    /// <summary>The form of a scan, sent to another address.</summary>
+    public static Task<Visitor> Sends(this Visitor visitor, string url)
+    {
+        visitor.Page.QuerySelector("form#log")!.SetAttribute("action", url);
+        return visitor.Presses(Logging.Submit);
+    }
+
     public static Guid Id(this Visitor visitor) => Guid.Parse(visitor.Page.QuerySelector<IHtmlInputElement>("[name='Form.Id']")!.Value);
 
     public static Task<Scan?> Kept(this RunningSite site, Guid id) => site.Ask(db => db.Scans.AsNoTracking().SingleOrDefaultAsync(s => s.Id == id));
