@@ -11,10 +11,14 @@ public sealed record ScanEntry(
 {
     public const int LongestNote = 1000;
 
+    /// <summary>Before it nobody scanned at a bedside (from memory); a year of two digits ends up far before it.</summary>
+    public const int EarliestYear = 1950;
+
     /// <summary>What cannot be so, each with the name of the value it is about.</summary>
     public IEnumerable<(string About, string Why)> Faults(Guid traineeId, Guid programmeId, DateTime now)
     {
         if (PerformedAt > now) yield return (nameof(PerformedAt), "This time has not come yet. Enter when the scan was performed.");
+        if (PerformedAt.Year < EarliestYear) yield return (nameof(PerformedAt), "This is too long ago. Check the year.");
         if (Subtype is not null && !Application.Subtypes.Contains(Subtype)) yield return (nameof(Subtype), $"Choose a part that belongs to {Application.Name}, or none.");
         if (Supervision == Supervision.Direct && Supervisor is null) yield return (nameof(Supervisor), "Name the person who supervised at the bedside.");
         if (Supervisor?.Id == traineeId) yield return (nameof(Supervisor), "Nobody supervises themselves.");

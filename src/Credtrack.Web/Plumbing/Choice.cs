@@ -16,6 +16,9 @@ public sealed class Choice : TagHelper
     public required string Value { get; set; }
     public bool Chosen { get; set; }
 
+    /// <summary>In a part of the form that is switched off nothing is chosen: radios of one name are one group, of which the last one wins.</summary>
+    public bool Off { get; set; }
+
     /// <summary>The first of a group carries the id to which a line of the error summary leads.</summary>
     public bool First { get; set; }
 
@@ -33,7 +36,7 @@ public sealed class Choice : TagHelper
         output.Content.AppendHtml("<span>").AppendHtml(words).AppendHtml("</span>");
     }
 
-    private bool IsChosen() => IsChosen(View, Name, Value, Chosen);
+    private bool IsChosen() => !Off && IsChosen(View, Name, Value, Chosen);
 
     /// <summary>What was sent with this request, or else what the page holds.</summary>
     public static bool IsChosen(ViewContext view, string name, string value, bool held) =>

@@ -32,5 +32,5 @@ public sealed class FaultLine : TagHelper
 
 public static class Faults
 {
-    public static bool ContainsFault(this ModelStateDictionary form, string name) => form.GetValueOrDefault(name)?.Errors.Count > 0;
+    public static bool ContainsFault(this ModelStateDictionary form, params IEnumerable<string> names) => names.Any(name => form.GetValueOrDefault(name)?.Errors.Count > 0);
 }

@@ -10,7 +10,7 @@ public sealed class Tied(ModelExpression input, string? hint, ViewContext view)
     private readonly string? fault = view.ModelState.GetValueOrDefault(input.Name)?.Errors.FirstOrDefault()?.ErrorMessage;
 
     public string Id { get; } = Field.IdOf(input.Name);
-    public string Name { get; } = input.Metadata.DisplayName ?? input.Name;
+    public string Name { get; } = input.Metadata.DisplayName ?? input.Metadata.PropertyName ?? input.Name;
     public bool IsWrong => fault is not null;
 
     /// <summary>For aria-describedby; null if there is nothing to add.</summary>

@@ -20,8 +20,8 @@ public static class ScanFormEntry
             Number(form.MechanicalIndex, "MechanicalIndex", 100, "0.9", faults), Number(form.ThermalIndex, "ThermalIndex", 100, "0.4", faults));
         var supervisor = page.Readers.SingleOrDefault(r => r.Id == form.Supervisor);
         if (form.Supervisor is not null && supervisor is null) faults.AddModelError("Form.Supervisor", "Choose a reader of this programme.");
-        var performedAt = form.PerformedAt is { } local ? LocalTimes.ToUtc(DateTime.SpecifyKind(local, DateTimeKind.Unspecified), zone) : now;
-        var entry = new ScanEntry(application, Trimmed(form.Subtype), performedAt, form.Role, form.Setting, form.Indicated,
+        // A part left over from another application is no fault where there is none to choose.
+        var entry = new ScanEntry(application, application.Subtypes.Count == 0 ? null : Trimmed(form.Subtype), PerformedAt(form, page.Scan, faults, zone, now), form.Role, form.Setting, form.Indicated,
             supervisor is null ? Supervision.Later : Supervision.Direct, supervisor, form.Assisted, settings, Trimmed(form.Note), form.Views, form.Answers);
         foreach (var (about, why) in entry.Faults(traineeId, page.ProgrammeId, now)) faults.AddModelError($"Form.{FieldOf(about)}", why);
         foreach (var (about, why) in Missing(form, page, entry)) faults.AddModelError($"Form.{about}", why);
@@ -34,6 +34,19 @@ public static class ScanFormEntry
         foreach (var picture in page.Kept) scan.Attach(by, picture.Still, now);
         if (!form.IsDraft) scan.Submit(by, now);
         return scan;
+    }
+
+    private static DateTime PerformedAt(ScanForm form, Scan? scan, ModelStateDictionary faults, TimeZoneInfo zone, DateTime now)
+    {
+        if (form.PerformedAt is not { } local)
+        {
+            faults.GetValueOrDefault("Form.PerformedAt")?.Errors.Clear();
+            faults.AddModelError("Form.PerformedAt", "Enter when the scan was performed.");
+            return now;
+        }
+        // The field shows no seconds, nor which of two equal times in autumn it was: a time left alone stays as it is.
+        if (scan is not null && scan.PerformedAt.In(zone) is var shown && shown.AddTicks(-(shown.Ticks % TimeSpan.TicksPerMinute)) == local) return scan.PerformedAt;
+        return local.Year is > 1 and < 9999 ? LocalTimes.ToUtc(DateTime.SpecifyKind(local, DateTimeKind.Unspecified), zone) : DateTime.SpecifyKind(local, DateTimeKind.Utc);
     }
 
     /// <summary>A draft may be as incomplete as it likes; what waits for a reading stays complete.</summary>

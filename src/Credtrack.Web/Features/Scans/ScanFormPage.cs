@@ -19,6 +19,9 @@ public sealed record ScanFormPage(
     IReadOnlyList<Person> Readers, Scan? Scan, string? WhyNot)
 {
     public IReadOnlyList<KeptPicture> Kept { get; set; } = [];
+
+    /// <summary>The scan as it is, beside what was typed, after somebody else was faster.</summary>
+    public ScanPage? Now { get; set; }
     public int PicturesAfter => Kept.Count + (Scan?.ShownPictures.Count(p => !Form.Remove.Contains(p.Id)) ?? 0);
     public Application? Chosen => Applications.SingleOrDefault(a => a.Code == Form.Application);
 

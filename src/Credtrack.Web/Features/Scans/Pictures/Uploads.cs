@@ -14,12 +14,18 @@ public sealed class Uploads(PictureFiles files, IDataProtectionProvider protecti
     /// <summary>Room for twelve of the largest files and the rest of the form.</summary>
     public const long LongestForm = Scan.MostPictures * (long)StillImage.MostBytes + 10 * 1024 * 1024;
 
-    private const string Field = "Form.Pictures";
+    public const string Field = "Form.Pictures";
 
-    public async Task<IReadOnlyList<KeptPicture>> Take(Guid personId, ScanForm form, int already, ModelStateDictionary faults)
+    /// <summary>What this request has taken, for whichever page answers it; null before.</summary>
+    public IReadOnlyList<KeptPicture>? Taken { get; private set; }
+
+    /// <param name="already">how many pictures the scan keeps besides</param>
+    public async Task Take(Guid personId, ScanForm form, int already, ModelStateDictionary faults)
     {
         var seal = protection.CreateProtector("picture kept for", personId.ToString());
-        List<KeptPicture> kept = [.. form.Kept.Select(note => new KeptPicture(note, JsonSerializer.Deserialize<StoredStill>(seal.Unprotect(note))!))];
+        List<KeptPicture> kept = [.. form.Kept.Distinct().Select(note => Found(note, seal)).OfType<KeptPicture>()];
+        if (kept.Count < form.Kept.Distinct().Count()) faults.AddModelError(Field, "A picture from your last try cannot be found any more: attach it again.");
+        if (already + kept.Count > Scan.MostPictures) faults.AddModelError(Field, $"A scan holds {Scan.MostPictures} pictures at most; leave out {already + kept.Count - Scan.MostPictures} of them.");
         for (var n = 0; n < form.Pictures.Count; n++)
         {
             if (already + kept.Count >= Scan.MostPictures)
@@ -32,8 +38,11 @@ public sealed class Uploads(PictureFiles files, IDataProtectionProvider protecti
             else kept.Add(await Keep(still, seal));
         }
         if (kept.Count > 0 && !form.NobodyNamed) faults.AddModelError("Form.NobodyNamed", "Look at each picture and confirm that no patient is named in it.");
-        return kept;
+        Taken = kept;
     }
+
+    private static KeptPicture? Found(string note, IDataProtector seal) =>
+        seal.Opened(note) is { } still ? new(note, JsonSerializer.Deserialize<StoredStill>(still)!) : null;
 
     private async Task<KeptPicture> Keep(StillImage still, IDataProtector seal)
     {
