@@ -56,7 +56,7 @@ internal static class FilterReader
         var wanted = part.FilledList().Select(item => item.OneOf(words)).OfType<T>().ToHashSet();
         var phrase = string.Join(" or ", wanted.Select(said));
         return new(key, false, scan => wanted.Contains(of(scan)), before ? phrase : null, before ? null : phrase,
-            scan => $"{key} {named(of(scan))} is not among {string.Join(", ", wanted.Select(named))}");
+            scan => $"{key} is {named(of(scan))}, not {string.Join(" or ", wanted.Select(named))}");
     }
 
     private static Condition YesNo(string key, JsonPart part, Func<SeenScan, bool> of, string yes, string no)
@@ -69,7 +69,7 @@ internal static class FilterReader
     {
         var wanted = part.FilledList().Select(item => item.Text()).OfType<string>().ToHashSet(StringComparer.Ordinal);
         return new(key, false, scan => scan.Evidence.Subtype is { } subtype && wanted.Contains(subtype), null, $"of subtype {string.Join(" or ", wanted)}",
-            scan => scan.Evidence.Subtype is { } subtype ? $"subtype {subtype} is not among {string.Join(", ", wanted)}" : "no subtype given");
+            scan => scan.Evidence.Subtype is { } subtype ? $"part is {subtype}, not {string.Join(" or ", wanted)}" : "no subtype given");
     }
 
     private static Condition Quality(string key, JsonPart part)
@@ -90,7 +90,7 @@ internal static class FilterReader
     {
         var wanted = part.FilledList().Select(item => item.OneOf(RuleWords.Results)).OfType<Readings.Result>().ToHashSet();
         return new(key, true, scan => scan.Result is { } result && wanted.Contains(result), null, $"with result {string.Join(" or ", wanted)}",
-            scan => scan.Result is { } result ? $"result {result} is not among {string.Join(", ", wanted)}" : "no result given");
+            scan => scan.Result is { } result ? $"result is {result}, not {string.Join(" or ", wanted)}" : "no result given");
     }
 
     private static Condition Positive(string key, JsonPart part)

@@ -6,8 +6,9 @@ namespace Credtrack.Web.Plumbing;
 public static class Seals
 {
     /// <summary>What was sealed, or null: forged, sealed for somebody else, or with a key that is gone.</summary>
-    public static string? Opened(this IDataProtector seal, string note)
+    public static string? Opened(this IDataProtector seal, string? note)
     {
+        if (string.IsNullOrEmpty(note)) return null;
         try
         {
             return seal.Unprotect(note);

@@ -1,40 +1,44 @@
 namespace Credtrack.Browser.Tests.Site;
 
-/// <summary>A page as somebody comes to it. What is done on the way changes nothing that another test looks at.</summary>
-public sealed record Place(string Name, string? Who, Func<Visitor, Task> Reach)
+/// <summary>
+/// A page as somebody comes to it, and words that only stand on it: before they are there, one would look at the page before.
+/// What is done on the way changes nothing that another test looks at.
+/// </summary>
+public sealed record Place(string Name, string? Who, string Shows, Func<Visitor, Task> Reach)
 {
     private const string Trainee = "Wrenna Ostholm", Drafter = "Maren Eskildsen", Reader = "Dr Halvard Quill", Director = "Dr Seraphine Okwuosa-Lund";
+    private const string Attention = "This needs your attention";
 
     private static readonly Place[] All =
     [
-        new("sign-in", null, v => v.Opens("/sign-in")),
-        new("sign-in with errors", null, async v => { await v.Opens("/sign-in"); await v.Presses("Sign in"); }),
-        new("home of a trainee", Trainee, v => v.Opens("/")),
-        new("home of a reader", Reader, v => v.Opens("/")),
-        new("home of a director", Director, v => v.Opens("/")),
-        new("scan log of a trainee", Trainee, v => v.Opens("/scans")),
-        new("scan log of a reader", Reader, v => v.Opens("/scans")),
-        new("new scan", Trainee, v => v.Opens("/scans/new")),
-        new("new scan, application chosen", Trainee, v => v.Opens("/scans/new?application=cardiac")),
-        new("new scan, all unfolded", Trainee, async v => { await v.Opens("/scans/new?application=cardiac"); await v.Unfolds("another time"); await v.UnfoldsApplications(); await v.Unfolds("More about this scan"); }),
-        new("new scan with errors", Trainee, async v => { await v.Opens("/scans/new?application=efast"); await v.Presses("Submit for reading"); }),
-        new("draft", Drafter, Draft),
-        new("edit a draft", Drafter, async v => { await Draft(v); await v.Follows("Change it"); }),
-        new("edit with errors", Drafter, async v => { await Draft(v); await v.Follows("Change it"); await v.Presses("Submit for reading"); }),
-        new("own scan that waits", Trainee, v => FirstScan(v, "Waiting")),
-        new("own scan that was read", Trainee, v => FirstScan(v, "Read")),
-        new("scan that waits, to a reader", Reader, v => FirstScan(v, "Waiting")),
-        new("scan that waits, to a director", Director, v => FirstScan(v, "Waiting")),
-        new("own standing", Trainee, v => v.Opens("/standings")),
-        new("standings", Director, v => v.Opens("/standings")),
-        new("standing of a trainee", Director, async v => { await v.Opens("/standings"); await v.Follows(Trainee); }),
-        new("rulebook", Trainee, async v => { await v.Opens("/standings"); await v.Follows("“Brindlemoor emergency”, version 4"); }),
-        new("bench", Reader, v => v.Opens("/readings")),
-        new("bench with errors", Reader, async v => { await v.Opens("/readings"); await v.Presses("Give this reading"); }),
-        new("bench, all unfolded", Reader, async v => { await v.Opens("/readings"); await v.Unfolds("Confirm or correct what was entered"); await v.Page.Keyboard.PressAsync("?"); }),
-        new("return", Reader, async v => { await v.Opens("/readings"); await v.Follows("Return it"); }),
-        new("return with errors", Reader, async v => { await v.Opens("/readings"); await v.Follows("Return it"); await v.Presses("Return it to the trainee"); }),
-        new("what does not exist", Trainee, v => v.Opens("/scans/none")),
+        new("sign-in", null, "With your account", v => v.Opens("/sign-in")),
+        new("sign-in with errors", null, Attention, async v => { await v.Opens("/sign-in"); await v.Presses("Sign in"); }),
+        new("home of a trainee", Trainee, "To be done", v => v.Opens("/")),
+        new("home of a reader", Reader, "Open the reading bench", v => v.Opens("/")),
+        new("home of a director", Director, "Emergency medicine has", v => v.Opens("/")),
+        new("scan log of a trainee", Trainee, "Newest first", v => v.Opens("/scans")),
+        new("scan log of a reader", Reader, "Newest first", v => v.Opens("/scans")),
+        new("new scan", Trainee, "What did you scan?", v => v.Opens("/scans/new")),
+        new("new scan, application chosen", Trainee, "Views you have shown", v => v.Opens("/scans/new?application=cardiac")),
+        new("new scan, all unfolded", Trainee, "Mechanical index", async v => { await v.Opens("/scans/new?application=cardiac"); await v.Unfolds("another time"); await v.UnfoldsApplications(); await v.Unfolds("More about this scan"); }),
+        new("new scan with errors", Trainee, Attention, async v => { await v.Opens("/scans/new?application=efast"); await v.Presses("Submit for reading"); }),
+        new("draft", Drafter, "nobody else sees it", Draft),
+        new("edit a draft", Drafter, "Change a scan", async v => { await Draft(v); await v.Follows("Change it"); }),
+        new("edit with errors", Drafter, Attention, async v => { await Draft(v); await v.Follows("Change it"); await v.Presses("Submit for reading"); }),
+        new("own scan that waits", Trainee, "What the trainee saw", v => FirstScan(v, "Waiting")),
+        new("own scan that was read", Trainee, "Both sets of answers", v => FirstScan(v, "Read")),
+        new("scan that waits, to a reader", Reader, "stay closed until", v => FirstScan(v, "Waiting")),
+        new("scan that waits, to a director", Director, "What the trainee saw", v => FirstScan(v, "Waiting")),
+        new("own standing", Trainee, "Nearest gaps", v => v.Opens("/standings")),
+        new("standings", Director, "What each trainee has", v => v.Opens("/standings")),
+        new("standing of a trainee", Director, "Nearest gaps", async v => { await v.Opens("/standings"); await v.Follows(Trainee); }),
+        new("rulebook", Trainee, "Which scans count", async v => { await v.Opens("/standings"); await v.Follows("“Brindlemoor emergency”, version 4"); }),
+        new("bench", Reader, "Image quality", v => v.Opens("/readings")),
+        new("bench with errors", Reader, Attention, async v => { await v.Opens("/readings"); await v.Presses("Give this reading"); }),
+        new("bench, all unfolded", Reader, "To the first question that is open", async v => { await v.Opens("/readings"); await v.Unfolds("Confirm or correct what was entered"); await v.Page.Keyboard.PressAsync("?"); }),
+        new("return", Reader, "What is missing?", async v => { await v.Opens("/readings"); await v.Follows("Return it"); }),
+        new("return with errors", Reader, Attention, async v => { await v.Opens("/readings"); await v.Follows("Return it"); await v.Presses("Return it to the trainee"); }),
+        new("what does not exist", Trainee, "There is nothing here", v => v.Opens("/scans/none")),
     ];
 
     public static TheoryData<string> Names => [.. All.Select(p => p.Name)];
@@ -44,6 +48,8 @@ public sealed record Place(string Name, string? Who, Func<Visitor, Task> Reach)
         var place = All.Single(p => p.Name == name);
         var visitor = await site.Visit(Screen.Desk, place.Who);
         await place.Reach(visitor);
+        await Expect(visitor.Page.GetByRole(AriaRole.Main).GetByText(place.Shows).Filter(new() { Visible = true })).ToBeVisibleAsync();
+        await visitor.Page.WaitForLoadStateAsync();
         return visitor;
     }
 

@@ -10,6 +10,7 @@ public static class ScanFormEntry
 {
     public static ScanEntry? ToEntry(this ScanForm form, ScanFormPage page, ModelStateDictionary faults, Guid traineeId, TimeZoneInfo zone, DateTime now)
     {
+        if (page.AsksForProgramme && page.Programmes.All(m => m.ProgrammeId != form.ProgrammeId)) faults.AddModelError("Form.ProgrammeId", "Choose the programme in which the scan is logged.");
         if (page.Chosen is not { } application)
         {
             faults.AddModelError("Form.Application", "Choose the application you scanned.");

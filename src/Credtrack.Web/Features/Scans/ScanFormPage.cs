@@ -23,6 +23,7 @@ public sealed record ScanFormPage(
     /// <summary>The scan as it is, beside what was typed, after somebody else was faster.</summary>
     public ScanPage? Now { get; set; }
     public int PicturesAfter => Kept.Count + (Scan?.ShownPictures.Count(p => !Form.Remove.Contains(p.Id)) ?? 0);
+    public bool AsksForProgramme => Scan is null && Programmes.Count > 1;
     public Application? Chosen => Applications.SingleOrDefault(a => a.Code == Form.Application);
 
     /// <summary>A scan that is being edited keeps the views and questions it was asked.</summary>
@@ -32,7 +33,7 @@ public sealed record ScanFormPage(
 
     public static async Task<ScanFormPage> Load(CredtrackDb db, Me me, ScanForm form, Scan? scan, TimeProvider clock)
     {
-        var programmes = me.Person.Memberships.Where(m => m.Kind == MembershipKind.Trainee).OrderBy(m => m.Programme.Name).ToList();
+        var programmes = me.Person.Memberships.Where(m => m.Kind == MembershipKind.Trainee).DistinctBy(m => m.ProgrammeId).OrderBy(m => m.Programme.Name).ToList();
         var programmeId = scan?.ProgrammeId ?? programmes.Find(m => m.ProgrammeId == form.ProgrammeId)?.ProgrammeId ?? programmes[0].ProgrammeId;
         var (now, today) = (clock.UtcNow(), me.Today(clock));
         var applications = await db.Applications.AsNoTracking().OrderBy(a => a.Name).ToListAsync();
