@@ -6,8 +6,10 @@ namespace Credtrack.Web.Features.Documents.Summaries;
 /// <summary>Whether the facts can be printed whole and truly. What cannot is refused in plain words before anything is drawn.</summary>
 internal static class Drawable
 {
-    // Every text but the reason stands in one piece on a page; three hundred of the widest letters still do, in the narrowest column.
-    private const int Longest = 300, LongestReason = 10_000;
+    // Every text but the reason stands in one piece on a page; three hundred of the widest letters still do, in the narrowest column. The code
+    // shares one line with other words in the foot of every page.
+    private const int Longest = 300, LongestReason = 10_000, LongestCode = 24;
+    private const string Reason = "reason for the gap", Code = "document code";
 
     public static string? WhyNot(SummaryFacts facts) =>
         Texts(facts).Select(t => WhyNot(t.Where, t.Text)).FirstOrDefault(why => why is not null)
@@ -20,7 +22,7 @@ internal static class Drawable
     {
         (string, string)[] own =
         [
-            ("name of the holder", facts.Holder), ("name of the programme", facts.Programme), ("name of the site", facts.Site), ("document code", facts.DocumentCode),
+            ("name of the holder", facts.Holder), ("name of the programme", facts.Programme), ("name of the site", facts.Site), (Code, facts.DocumentCode),
             ("address of the check page", facts.CheckAddress), ("privilege", facts.Privilege), ("name of the rulebook", facts.RulebookName), ("version of the rulebook", facts.RulebookVersion),
             ("name of the signer", facts.SignerName), ("role of the signer", facts.SignerRole), ("time zone", facts.ZoneId), ("meaning of the signature", facts.Meaning),
             ("fingerprint of the certificate", facts.CertificateFingerprint), .. Given(Reason, facts.GapReason), .. Given("head of the ledger", facts.LedgerHead),
@@ -31,11 +33,9 @@ internal static class Drawable
 
     private static (string, string)[] Given(string where, string? text) => text is null ? [] : [(where, text)];
 
-    private const string Reason = "reason for the gap";
-
     private static string? WhyNot(string where, string text)
     {
-        var most = where == Reason ? LongestReason : Longest;
+        var most = where switch { Reason => LongestReason, Code => LongestCode, _ => Longest };
         if (string.IsNullOrWhiteSpace(text)) return $"The {where} is empty.";
         if (text.Length > most) return $"The {where} has {text.Length.ToString(CultureInfo.InvariantCulture)} characters; {most.ToString(CultureInfo.InvariantCulture)} at most fit.";
         var letters = text.EnumerateRunes().ToList();

@@ -52,6 +52,7 @@ public sealed class RefusedSummaryTests
         Assert.Equal("The summary names no application.", CompetencySummary.WhyNotDraw(Samples.Met with { Lines = [] }));
         Assert.Equal("There is no time zone Mars/Olympus; take an IANA name such as Europe/Dublin.", CompetencySummary.WhyNotDraw(Samples.Met with { ZoneId = "Mars/Olympus" }));
         Assert.Equal("The address of the check page must be absolute, such as https://credtrack.example/check.", CompetencySummary.WhyNotDraw(Samples.Met with { CheckAddress = "/check/K7QX" }));
+        Assert.Equal("The document code has 25 characters; 24 at most fit.", CompetencySummary.WhyNotDraw(Samples.Met with { DocumentCode = new string('M', 25) }));
         Assert.Equal("The meaning of the signature has 301 characters; 300 at most fit.", CompetencySummary.WhyNotDraw(Samples.Met with { Meaning = new string('x', 301) }));
     }
 
