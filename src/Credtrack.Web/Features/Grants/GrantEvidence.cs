@@ -6,7 +6,7 @@ using Credtrack.Web.Features.Standings;
 namespace Credtrack.Web.Features.Grants;
 
 /// <summary>What there is on a day for one grant: the standing of its application, and the text that would be signed over it.</summary>
-public sealed record GrantEvidence(Grant Grant, string Holder, string Application, string Code, ApplicationStanding? Standing, Statement Statement)
+public sealed record GrantEvidence(Grant Grant, string Holder, string Application, string Code, ApplicationStanding? Evaluated, Statement Statement)
 {
     public static async Task<GrantEvidence> Load(CredtrackDb db, Site site, Grant grant, DateOnly today)
     {
@@ -15,7 +15,7 @@ public sealed record GrantEvidence(Grant Grant, string Holder, string Applicatio
         var rulebook = await db.RulebookInForce(grant.ProgrammeId);
         var evidence = (await db.EvidenceOf([grant.HolderId]))[grant.HolderId];
         var rules = RulesOf.InForce(rulebook, site);
-        var standing = rules is null ? null : Standing.Of(rules, evidence, [], today);
+        var standing = rules is null ? null : Core.Measures.Standings.Standing.Of(rules, evidence, [], today);
         var application = standing?.Applications.FirstOrDefault(a => a.Code == names.Code);
         var findings = standing?.Findings.Where(f => f.Application == names.Code).ToList() ?? [];
         var statement = new Statement(site.Name, names.Holder, grant.HolderId, names.Programme, grant.Privilege, names.Application, today,

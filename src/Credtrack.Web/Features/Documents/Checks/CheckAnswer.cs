@@ -3,12 +3,12 @@ using Credtrack.Web.Features.Documents.Seals;
 
 namespace Credtrack.Web.Features.Documents.Checks;
 
-public enum Standing { Stands, Ended, Unconfirmed }
+public enum Holding { Stands, Ended, Unconfirmed }
 
 /// <summary>The answer in one sentence, and what the paper says itself; nothing more.</summary>
-public sealed record CheckAnswer(Standing Standing, string Sentence, string? Code, string? Holder, string? Privilege, DateTime? SealedAt, DateTime? EndedAt)
+public sealed record CheckAnswer(Holding Holding, string Sentence, string? Code, string? Holder, string? Privilege, DateTime? SealedAt, DateTime? EndedAt)
 {
-    public static CheckAnswer Unconfirmed(string sentence) => new(Standing.Unconfirmed, sentence, null, null, null, null, null);
+    public static CheckAnswer Unconfirmed(string sentence) => new(Holding.Unconfirmed, sentence, null, null, null, null, null);
 
     public static async Task<CheckAnswer> OfCode(CredtrackDb db, string code) =>
         await Find(db, d => d.Code == code) ?? Unconfirmed("No document with this number was issued here. Look at each letter again; if it stays so, do not rely on the paper.");
@@ -16,10 +16,13 @@ public sealed record CheckAnswer(Standing Standing, string Sentence, string? Cod
     /// <summary>The bytes must be those that were issued; a seal that verifies on other bytes is not enough where the stored digest is at hand.</summary>
     public static async Task<CheckAnswer> OfFile(CredtrackDb db, byte[] file, SealingCertificate certificate)
     {
-        var sha256 = Digest(file);
-        if (await Find(db, d => d.Sha256 == sha256) is { } ours) return ours;
-        return Unconfirmed(SealCheck.Of(file, certificate.Root).Sentence);
+        if (await OfDigest(db, Digest(file)) is { } ours) return ours;
+        var finding = SealCheck.Of(file, certificate.Trust);
+        return Unconfirmed(finding.IsGood ? "The seal is ours, but these are not the bytes that were issued." : finding.Sentence);
     }
+
+    /// <summary>By the SHA-256 of the bytes; null if they were never issued here.</summary>
+    public static Task<CheckAnswer?> OfDigest(CredtrackDb db, string sha256) => Find(db, d => d.Sha256 == sha256);
 
     public static string Digest(byte[] file) => Convert.ToHexStringLower(System.Security.Cryptography.SHA256.HashData(file));
 
@@ -35,7 +38,7 @@ public sealed record CheckAnswer(Standing Standing, string Sentence, string? Cod
         }).SingleOrDefaultAsync();
         if (row is null) return null;
         return row.Ended is null
-            ? new(Standing.Stands, "Ours, unaltered, and it stands today", row.Code, row.Holder, row.Privilege, row.At, null)
-            : new(Standing.Ended, "Ours and unaltered, but it no longer stands", row.Code, row.Holder, row.Privilege, row.At, row.Ended);
+            ? new(Holding.Stands, "Ours, unaltered, and it stands today", row.Code, row.Holder, row.Privilege, row.At, null)
+            : new(Holding.Ended, "Ours and unaltered, but it no longer stands", row.Code, row.Holder, row.Privilege, row.At, row.Ended);
     }
 }

@@ -45,6 +45,16 @@ public sealed class SealingCertificate : IDisposable
             : new SealingCertificate(signer, trust);
     }
 
+    /// <summary>That of this site, by its settings and under its name.</summary>
+    public static SealingCertificate OfSite(IServiceProvider services)
+    {
+        using var scope = services.CreateScope();
+        var (settings, db) = (services.GetRequiredService<Settings>(), scope.ServiceProvider.GetRequiredService<CredtrackDb>());
+        var former = settings.Seal.Former is { } file ? FileText.Read(file, out var fault) ?? throw Settings.Wrong($"Seal:Former, {file}: {fault}.") : null;
+        var site = db.Sites.AsNoTracking().Select(s => s.Name).FirstOrDefault() ?? "Credtrack";
+        return LoadOrMake(settings.Seal.Certificate, settings.Seal.Password, former, site, services.GetRequiredService<TimeProvider>(), services.GetRequiredService<ILogger<SealingCertificate>>());
+    }
+
     public void Dispose() => Signer.Dispose();
 
     // The key stays in memory and goes into no store; macOS knows no such keys.

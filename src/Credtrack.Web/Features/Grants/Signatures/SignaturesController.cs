@@ -19,10 +19,11 @@ public sealed class SignaturesController(CredtrackDb db, Me me, TimeProvider clo
         var page = (await SignaturePage.Load(db, me, grantId, form, me.Today(clock)))!;
         if (page.Moved.Count > 0) return this.Moved("New", page);
         if (page.WhyNot is null) await form.Judge(page, accounts, me.Person, ModelState);
+        if (ModelState.IsValid && issuing.WhyNot(page.Statement, me.Person, form.GapReason, me.Site, clock.UtcNow()) is { } why) ModelState.AddModelError("", why);
         if (page.WhyNot is null && !ModelState.IsValid) return this.Again("New", page);
         db.Seen(grant, version);
         grant.Sign(me.Person, page.Statement, form.Meaning ?? default, form.GapReason, clock.UtcNow());
-        await issuing.Issue(grant, page.Statement, me);
+        issuing.Issue(grant, page.Statement, me.Person, me.Site);
         await db.SaveChangesAsync();
         return this.Done($"~/grants/{grantId}", "Signed and sealed");
     }

@@ -1,12 +1,13 @@
 using Credtrack.Core.Catalogue;
 using Credtrack.Core.Rulebooks;
+using Credtrack.Web.Features.Documents;
 using Credtrack.Web.Features.Scans.Pictures;
 using Microsoft.AspNetCore.Identity;
 
 namespace Credtrack.Web.Features.SignIn.Demo;
 
 /// <summary>An invented institution with two programmes and a year of scans, made from a seed through the same verbs as real ones.</summary>
-public sealed class DemoSite(CredtrackDb db, PictureFiles pictures, DateTime now)
+public sealed class DemoSite(CredtrackDb db, PictureFiles pictures, Issuing issuing, DateTime now)
 {
     public const string Password = "scan-and-read-2026";
 
@@ -18,7 +19,7 @@ public sealed class DemoSite(CredtrackDb db, PictureFiles pictures, DateTime now
         await using var scope = services.CreateAsyncScope();
         var db = scope.ServiceProvider.GetRequiredService<CredtrackDb>();
         if (await db.People.AnyAsync()) return;
-        await new DemoSite(db, scope.ServiceProvider.GetRequiredService<PictureFiles>(), services.GetRequiredService<TimeProvider>().UtcNow()).Build();
+        await new DemoSite(db, scope.ServiceProvider.GetRequiredService<PictureFiles>(), scope.ServiceProvider.GetRequiredService<Issuing>(), services.GetRequiredService<TimeProvider>().UtcNow()).Build();
     }
 
     private async Task Build()
@@ -45,6 +46,7 @@ public sealed class DemoSite(CredtrackDb db, PictureFiles pictures, DateTime now
         db.AddRange(Accounts());
         await db.SaveChangesAsync();
         await new DemoScans(db, pictures, people, applications, now).Build([emergency, medicine]);
+        await DemoGrants.Build(db, issuing, site, director, emergency, now);
     }
 
     private void Trainees(string[] names, Programme programme)
