@@ -1,3 +1,4 @@
+using System.Globalization;
 using System.Security.Cryptography;
 using System.Security.Cryptography.X509Certificates;
 
@@ -20,14 +21,13 @@ public static class SealCheck
     {
         if (trust.Signers.FirstOrDefault(s => file.Signature.AsSpan().IndexOf(s.RawDataMemory.Span) >= 0) is not { } signer)
             return SealFinding.NotOurs("the certificate in the seal is not one of this site", file.Place);
-        if (trust.WhyNot(signer, file.SealedAt) is { } whyNot) return SealFinding.NotOurs($"the certificate in the seal was not good at the time of sealing ({whyNot})", file.Place);
 
         using var key = signer.GetRSAPublicKey();
         if (key is null || Claimed(file, signer, trust, key.KeySize / 8) is not var (digest, signature)) return SealFinding.Altered("the signature is not made as we make it", file.Place);
         if (!key.VerifyData(SealCms.Attributes(digest, signer), signature, HashAlgorithmName.SHA256, RSASignaturePadding.Pkcs1)) return SealFinding.Altered("the signature does not hold", file.Place);
-        return digest.AsSpan().SequenceEqual(SHA256.HashData(file.Covered))
-            ? new(SealVerdict.OursAndUnaltered, $"Sealed by {signer.GetNameInfo(X509NameType.SimpleName, false)} of this site at {file.SealedAt:yyyy-MM-dd HH:mm:ss} UTC, and not altered since.", file.Place, file.SealedAt)
-            : SealFinding.Altered("its bytes are not those that were sealed", "outside the seal, in any of its bytes");
+        if (!digest.AsSpan().SequenceEqual(SHA256.HashData(file.Covered))) return SealFinding.Altered("its bytes are not those that were sealed", "outside the seal, in any of its bytes");
+        if (trust.WhyNot(signer, file.SealedAt) is { } whyNot) return SealFinding.NotOurs($"the certificate in the seal was not good at the time of sealing ({whyNot})", file.Place);
+        return new(SealVerdict.OursAndUnaltered, string.Create(CultureInfo.InvariantCulture, $"Sealed by {signer.GetNameInfo(X509NameType.SimpleName, false)} of this site at {file.SealedAt:yyyy-MM-dd HH:mm:ss} UTC, and not altered since."), file.Place, file.SealedAt);
     }
 
     // The two parts that differ from seal to seal; null if anything around them is not as we write it. The signature's bytes come last.

@@ -13,10 +13,12 @@ public sealed class SealTrust
     public const string DocumentSigning = "1.3.6.1.5.5.7.3.36";
 
     private readonly X509Certificate2Collection all = [];
+    private readonly Dictionary<X509Certificate2, X509Certificate2Collection> chains;
 
     public SealTrust(IEnumerable<X509Certificate2> certificates)
     {
-        foreach (var certificate in certificates.DistinctBy(c => c.GetCertHashString(HashAlgorithmName.SHA256))) all.Add(X509CertificateLoader.LoadCertificate(certificate.RawData));
+        foreach (var certificate in certificates.Distinct()) all.Add(X509CertificateLoader.LoadCertificate(certificate.RawData));
+        chains = all.Where(c => !IsAuthority(c)).ToDictionary(c => c, Built);
     }
 
     /// <summary>From the PEM text of certificates; null if it holds none or is damaged.</summary>
@@ -32,21 +34,23 @@ public sealed class SealTrust
 
     public IReadOnlyList<X509Certificate2> Certificates => [.. all];
 
-    public IEnumerable<X509Certificate2> Signers => all.Where(c => !IsAuthority(c));
+    public IEnumerable<X509Certificate2> Signers => chains.Keys;
 
-    /// <summary>The certificate and what stands above it, up to its root.</summary>
-    public X509Certificate2Collection ChainOf(X509Certificate2 signer)
-    {
-        using var chain = Chain(signer.NotBefore);
-        chain.Build(signer);
-        return [.. chain.ChainElements.Select(e => e.Certificate)];
-    }
+    /// <summary>One of the signers and what stands above it, up to its root.</summary>
+    public X509Certificate2Collection ChainOf(X509Certificate2 signer) => chains[signer];
 
     /// <summary>Why a certificate could not seal at an instant, or null. Whether it was withdrawn is not asked: nobody keeps a list.</summary>
     public string? WhyNot(X509Certificate2 signer, DateTime at)
     {
         using var chain = Chain(at);
         return chain.Build(signer) ? null : string.Join(", ", chain.ChainStatus.Select(s => s.Status));
+    }
+
+    private X509Certificate2Collection Built(X509Certificate2 signer)
+    {
+        using var chain = Chain(signer.NotBefore);
+        chain.Build(signer);
+        return [.. chain.ChainElements.Select(e => e.Certificate)];
     }
 
     private X509Chain Chain(DateTime at)
