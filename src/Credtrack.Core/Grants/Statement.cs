@@ -15,6 +15,9 @@ public sealed record Statement(
     string Site, string Holder, Guid HolderId, string Programme, string Privilege, string Application, DateOnly AsOf,
     int Performed, int Read, int Counted, IReadOnlyList<Evidenced> Requirements, string Rulebook, int Edition, string Trace)
 {
+    /// <summary>The plain number of scans that is asked for, where the rulebook asks for one; a figure is drawn from it, nothing is signed by it.</summary>
+    public int? Required { get; init; }
+
     public IReadOnlyList<Evidenced> Gaps => [.. Requirements.Where(r => !r.Met)];
 
     public IReadOnlyList<string> Lines =>

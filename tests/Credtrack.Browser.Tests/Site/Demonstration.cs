@@ -37,6 +37,7 @@ public sealed class Demonstration : WebApplicationFactory<Program>, IAsyncLifeti
     {
         builder.UseSetting("ConnectionStrings:Credtrack", $"Data Source={Path.Combine(folder.FullName, "credtrack.db")};Pooling=False");
         builder.UseSetting("Pictures:Folder", Path.Combine(folder.FullName, "pictures"));
+        builder.UseSetting("Seal:Certificate", Path.Combine(folder.FullName, "seal", "seal.pfx"));
         builder.ConfigureLogging(log => log.ClearProviders());
     }
 

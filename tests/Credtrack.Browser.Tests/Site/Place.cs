@@ -33,6 +33,14 @@ public sealed record Place(string Name, string? Who, string Shows, Func<Visitor,
         new("standings", Director, "What each trainee has", v => v.Opens("/standings")),
         new("standing of a trainee", Director, "Nearest gaps", async v => { await v.Opens("/standings"); await v.Follows(Trainee); }),
         new("rulebook", Trainee, "Which scans count", async v => { await v.Opens("/standings"); await v.Follows("“Brindlemoor emergency”, version 4"); }),
+        new("desk", Director, "Signed and standing", v => v.Opens("/grants")),
+        new("grants of a trainee", Trainee, "Signed and standing", v => v.Opens("/grants")),
+        new("evidence and signature", Director, "What exactly you sign", Evidence),
+        new("signature with errors", Director, Attention, async v => { await Evidence(v); await v.Presses("Sign and seal"); }),
+        new("signed grant", Trainee, "What was signed", async v => { await v.Opens("/grants"); await v.Follows(v.Page.Locator("section:has(#h-Active) .who").First); }),
+        new("decline", Director, "the trainee is told", async v => { await Evidence(v); await v.Follows("Decline it, with a reason"); }),
+        new("check a document", null, "Choose the PDF", v => v.Opens("/documents/checks")),
+        new("check a number never issued", null, "We cannot confirm this document", v => v.Opens("/documents/checks?code=0000-0000-0000-0000-0000")),
         new("bench", Reader, "Image quality", v => v.Opens("/readings")),
         new("bench with errors", Reader, Attention, async v => { await v.Opens("/readings"); await v.Presses("Give this reading"); }),
         new("bench, all unfolded", Reader, "To the first question that is open", async v => { await v.Opens("/readings"); await v.Unfolds("Confirm or correct what was entered"); await v.Page.Keyboard.PressAsync("?"); }),
@@ -57,6 +65,12 @@ public sealed record Place(string Name, string? Who, string Shows, Func<Visitor,
     {
         await visitor.Opens($"/scans?state={state}");
         await visitor.Follows(visitor.Page.GetByRole(AriaRole.Region, new() { Name = "Newest first" }).GetByRole(AriaRole.List).GetByRole(AriaRole.Link).First);
+    }
+
+    private static async Task Evidence(Visitor visitor)
+    {
+        await visitor.Opens("/grants");
+        await visitor.Follows(visitor.Page.GetByRole(AriaRole.Link, new() { Name = "Look at the evidence" }).First);
     }
 
     private static async Task Draft(Visitor visitor)

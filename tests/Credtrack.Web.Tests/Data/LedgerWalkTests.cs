@@ -1,4 +1,3 @@
-using System.Diagnostics;
 using Credtrack.Core.Scans;
 using Microsoft.Data.Sqlite;
 
@@ -8,27 +7,18 @@ public sealed class LedgerWalkTests
 {
     private const int Subjects = 1000;
     private const int Each = 100;
-    private static readonly TimeSpan Bar = TimeSpan.FromSeconds(10); // it took a quarter of that on two busy cores
 
     [Fact]
-    public async Task A_hundred_thousand_entries_are_walked_in_seconds_and_none_is_kept()
+    public async Task A_hundred_thousand_entries_are_walked_and_none_is_kept()
     {
         var file = BlankSite.NewCopy();
         await Fill(file);
         await using var copy = LedgerCopy.Open(file);
-        var (fastest, walk) = (TimeSpan.MaxValue, new LedgerWalk(copy.Db));
-        // A slow walk has two more tries, so that a busy machine is not what is measured.
-        for (var round = 0; round < 3 && fastest > Bar; round++)
-        {
-            var watch = Stopwatch.StartNew();
-            await (walk = new LedgerWalk(copy.Db)).Run();
-            fastest = watch.Elapsed < fastest ? watch.Elapsed : fastest;
-        }
-        TestContext.Current.TestOutputHelper?.WriteLine($"{walk.Entries} entries: {fastest.TotalSeconds:0.00} s");
+        var walk = new LedgerWalk(copy.Db);
+        await walk.Run();
         Assert.Empty(walk.Broken);
         Assert.InRange(walk.Entries, Subjects * Each, Subjects * Each + 100);
         Assert.Empty(copy.Db.ChangeTracker.Entries());
-        Assert.InRange(fastest, TimeSpan.Zero, Bar);
     }
 
     // Past the program, row by row: saving so many with their nouns would take minutes.

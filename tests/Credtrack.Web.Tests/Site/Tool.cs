@@ -14,10 +14,10 @@ public static class Tool
     }
 
     /// <summary>How the program ended, what it wrote, and what it complained about.</summary>
-    public static (int Code, string Said, string Complaint) Run(string program, params string[] arguments)
+    public static (int Code, string Output, string Error) Run(string program, params string[] arguments)
     {
         var places = Environment.GetEnvironmentVariable("PATH")!.Split(Path.PathSeparator);
-        Assert.True(places.Append("").Any(place => File.Exists(Path.Combine(place, program))), $"{program} is not installed. The tests need these Debian packages: poppler-utils qpdf zbar-tools python3-pikepdf.");
+        Assert.True(places.Append("").Any(place => File.Exists(Path.Combine(place, program))), $"{program} is not installed. The tests need these Debian packages: poppler-utils qpdf zbar-tools python3-pikepdf libnss3-tools openssl.");
         using var run = Process.Start(new ProcessStartInfo(program, arguments) { RedirectStandardOutput = true, RedirectStandardError = true })!;
         // Both ends are read at once: a full pipe would stop the program for ever.
         var complaint = run.StandardError.ReadToEndAsync();

@@ -27,7 +27,7 @@ public sealed class Issuing(SealingCertificate certificate, Settings settings)
         Site = site.Name,
         DocumentCode = code,
         CheckAddress = $"{settings.PublicAddress.TrimEnd('/')}/documents/checks?code={code}",
-        Lines = [new(statement.Application, statement.Performed, statement.Read, statement.Counted, [.. statement.Requirements.Select(r => (r.Asked, r.Value, r.Met))])],
+        Lines = [new(statement.Application, statement.Performed, statement.Read, statement.Counted, [.. statement.Requirements.Select(r => (r.Asked, r.Value, r.Met))]) { Required = statement.Required }],
         Privilege = statement.Privilege,
         GrantedFrom = at.DayIn(TimeZoneInfo.FindSystemTimeZoneById(site.TimeZone)),
         RulebookName = statement.Rulebook,

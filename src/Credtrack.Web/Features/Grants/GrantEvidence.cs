@@ -20,7 +20,7 @@ public sealed record GrantEvidence(Grant Grant, string Holder, string Applicatio
         var findings = standing?.Findings.Where(f => f.Application == names.Code).ToList() ?? [];
         var statement = new Statement(site.Name, names.Holder, grant.HolderId, names.Programme, grant.Privilege, names.Application, today,
             findings.Count, findings.Count(f => f.Seen.IsRead), findings.Count(f => f.Verdict == Verdict.Counts),
-            Requirements(application), rulebook?.Name ?? "none", rulebook?.Edition ?? 0, Statement.Seal(findings));
+            Requirements(application), rulebook?.Name ?? "none", rulebook?.Edition ?? 0, Statement.Seal(findings)) { Required = application is null ? null : StandingLine.Of(standing!, application, names.Application).Depth?.Required };
         return new(grant, names.Holder, names.Application, names.Code, application, statement);
     }
 

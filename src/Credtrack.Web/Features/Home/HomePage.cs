@@ -7,7 +7,7 @@ namespace Credtrack.Web.Features.Home;
 public sealed record ToDoLine(Guid ScanId, string Application, DateTime PerformedAt, ScanState State, string? Missing);
 
 /// <summary>What a programme's director or coordinator wants to know at a glance.</summary>
-public sealed record ProgrammeLine(string Name, int Trainees, int Waiting, DateTime? OldestSince);
+public sealed record ProgrammeLine(string Name, int Trainees, int Waiting, DateTime? OldestSince, int Proposed);
 
 /// <summary>What is to be done, each membership's part on its own; a part that does not concern the person is null.</summary>
 public sealed record HomePage(IReadOnlyList<ToDoLine>? ToDo, int Waiting, StandingLine? NearestGap, Bench? Bench, IReadOnlyList<ProgrammeLine> Programmes)
@@ -37,10 +37,12 @@ public sealed record HomePage(IReadOnlyList<ToDoLine>? ToDo, int Waiting, Standi
         var waiting = await db.Scans.Where(s => led.Contains(s.ProgrammeId) && s.Withdrawal == null && !s.Readings.Any())
             .SelectMany(s => s.Submissions.Where(x => x.Return == null), (s, x) => new { s.ProgrammeId, x.At })
             .GroupBy(x => x.ProgrammeId).Select(g => new { g.Key, Number = g.Count(), Oldest = g.Min(x => x.At) }).ToDictionaryAsync(g => g.Key);
+        var proposed = await db.Grants.Where(g => led.Contains(g.ProgrammeId) && g.Decline == null && !g.Signatures.Any())
+            .GroupBy(g => g.ProgrammeId).Select(g => new { g.Key, Number = g.Count() }).ToDictionaryAsync(g => g.Key, g => g.Number);
         return [.. from programme in person.Memberships.Select(m => m.Programme).DistinctBy(p => p.Id)
                    where led.Contains(programme.Id)
                    let wait = waiting.GetValueOrDefault(programme.Id)
                    orderby programme.Name
-                   select new ProgrammeLine(programme.Name, trainees.GetValueOrDefault(programme.Id), wait?.Number ?? 0, wait?.Oldest)];
+                   select new ProgrammeLine(programme.Name, trainees.GetValueOrDefault(programme.Id), wait?.Number ?? 0, wait?.Oldest, proposed.GetValueOrDefault(programme.Id))];
     }
 }

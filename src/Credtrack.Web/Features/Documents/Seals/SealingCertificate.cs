@@ -51,7 +51,7 @@ public sealed class SealingCertificate : IDisposable
         using var scope = services.CreateScope();
         var (settings, db) = (services.GetRequiredService<Settings>(), scope.ServiceProvider.GetRequiredService<CredtrackDb>());
         var former = settings.Seal.Former is { } file ? FileText.Read(file, out var fault) ?? throw Settings.Wrong($"Seal:Former, {file}: {fault}.") : null;
-        var site = db.Sites.AsNoTracking().Select(s => s.Name).FirstOrDefault() ?? "Credtrack";
+        var site = db.Sites.AsNoTracking().Select(s => s.Name).SingleOrDefault() ?? "Credtrack";
         return LoadOrMake(settings.Seal.Certificate, settings.Seal.Password, former, site, services.GetRequiredService<TimeProvider>(), services.GetRequiredService<ILogger<SealingCertificate>>());
     }
 

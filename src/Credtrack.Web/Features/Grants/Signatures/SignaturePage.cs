@@ -8,7 +8,10 @@ public sealed record SignaturePage(GrantEvidence Evidence, string ProposedBy, st
     public Grant Grant => Evidence.Grant;
     public Statement Statement => Evidence.Statement;
 
-    /// <summary>What moved since the text was shown; empty if nothing did.</summary>
+    /// <summary>What was to be signed is not what there is now.</summary>
+    public bool HasMoved { get; init; }
+
+    /// <summary>What moved since the text was shown, line by line.</summary>
     public IReadOnlyList<(string Was, string Is)> Moved { get; init; } = [];
 
     /// <summary>Where the scans behind a value are.</summary>

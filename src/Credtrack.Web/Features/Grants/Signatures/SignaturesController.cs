@@ -15,9 +15,9 @@ public sealed class SignaturesController(CredtrackDb db, Me me, TimeProvider clo
     public async Task<IActionResult> Create(Guid grantId, SignatureForm form, [FromServices] UserManager<Account> accounts)
     {
         if (await db.GrantsVisibleTo(me.Person).Find(grantId) is not { } grant) return NotFound();
-        var version = form.Version;
+        var (version, shown) = (form.Version, form.Digest);
         var page = (await SignaturePage.Load(db, me, grantId, form, me.Today(clock)))!;
-        if (page.Moved.Count > 0) return this.Moved("New", page);
+        if (shown != page.Statement.Digest) return this.Moved("New", page with { HasMoved = true });
         if (page.WhyNot is null) await form.Judge(page, accounts, me.Person, ModelState);
         if (ModelState.IsValid && issuing.WhyNot(page.Statement, me.Person, form.GapReason, me.Site, clock.UtcNow()) is { } why) ModelState.AddModelError("", why);
         if (page.WhyNot is null && !ModelState.IsValid) return this.Again("New", page);

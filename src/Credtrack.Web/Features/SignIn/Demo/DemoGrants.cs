@@ -31,9 +31,10 @@ internal static class DemoGrants
             var grant = Grant.Propose(director, holder, programme, application, $"{application.Name}: point-of-care ultrasound without supervision", [], at);
             db.Add(grant);
             await db.SaveChangesAsync();
+            // Signed today: the seal cannot be older than the certificate, which was made just now.
             if (plan.Then == "decline") grant.TurnDown(director, plan.Reason!, at.AddHours(2));
-            if (plan.Then is "sign" or "end") await Sign(db, issuing, site, director, grant, plan, at.AddHours(3));
-            if (plan.Then == "end") grant.End(director, plan.Reason!, at.AddHours(30));
+            if (plan.Then is "sign" or "end") await Sign(db, issuing, site, director, grant, plan, now);
+            if (plan.Then == "end") grant.End(director, plan.Reason!, now);
             if (plan.Then != "wait") await db.SaveChangesAsync();
             db.ChangeTracker.Clear();
         }

@@ -7,7 +7,7 @@ using Microsoft.AspNetCore.Identity;
 namespace Credtrack.Web.Features.SignIn.Demo;
 
 /// <summary>An invented institution with two programmes and a year of scans, made from a seed through the same verbs as real ones.</summary>
-public sealed class DemoSite(CredtrackDb db, PictureFiles pictures, Issuing issuing, DateTime now)
+public sealed class DemoSite(CredtrackDb db, PictureFiles pictures, Func<Issuing> issuing, DateTime now)
 {
     public const string Password = "scan-and-read-2026";
 
@@ -19,7 +19,7 @@ public sealed class DemoSite(CredtrackDb db, PictureFiles pictures, Issuing issu
         await using var scope = services.CreateAsyncScope();
         var db = scope.ServiceProvider.GetRequiredService<CredtrackDb>();
         if (await db.People.AnyAsync()) return;
-        await new DemoSite(db, scope.ServiceProvider.GetRequiredService<PictureFiles>(), scope.ServiceProvider.GetRequiredService<Issuing>(), services.GetRequiredService<TimeProvider>().UtcNow()).Build();
+        await new DemoSite(db, scope.ServiceProvider.GetRequiredService<PictureFiles>(), scope.ServiceProvider.GetRequiredService<Issuing>, services.GetRequiredService<TimeProvider>().UtcNow()).Build();
     }
 
     private async Task Build()
@@ -46,7 +46,8 @@ public sealed class DemoSite(CredtrackDb db, PictureFiles pictures, Issuing issu
         db.AddRange(Accounts());
         await db.SaveChangesAsync();
         await new DemoScans(db, pictures, people, applications, now).Build([emergency, medicine]);
-        await DemoGrants.Build(db, issuing, site, director, emergency, now);
+        // Only now: the certificate of the seal bears the name of the site.
+        await DemoGrants.Build(db, issuing(), site, director, emergency, now);
     }
 
     private void Trainees(string[] names, Programme programme)

@@ -1,0 +1,78 @@
+namespace Credtrack.Web.Tests.Features.Grants;
+
+public sealed class GrantsTests(RunningSite site) : IClassFixture<RunningSite>
+{
+    [Fact]
+    public async Task A_director_proposes_from_a_standing_and_finds_it_on_the_desk()
+    {
+        var world = await site.NewWorld();
+        using var director = await world.As(world.Director);
+        await director.Opens($"/standings/{world.Trainee.Id}");
+        await director.Opens(director.Page.QuerySelector("a[href*='/grants/new'][href*='cardiac']")!.GetAttribute("href")!);
+        await director.Fills("What is allowed", Granting.Privilege).Presses("Propose it");
+        Assert.Contains("Proposed", director.Text, StringComparison.Ordinal);
+        await director.Opens("/grants");
+        Assert.Contains("1 proposal waits for your signature.", director.Text, StringComparison.Ordinal);
+        Assert.Contains(Granting.Privilege, director.Text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task An_empty_privilege_is_asked_for_and_a_second_proposal_is_answered_with_the_reason()
+    {
+        var world = await site.NewWorld();
+        using var director = await world.As(world.Director);
+        var url = $"/grants/new?holder={world.Trainee.Id}&programme={world.Programme.Id}&application=cardiac";
+        await director.Opens(url);
+        await director.Fills("What is allowed", " ").Presses("Propose it");
+        Assert.Equal(HttpStatusCode.UnprocessableEntity, director.Status);
+        Assert.Contains("Say what is allowed.", director.Text, StringComparison.Ordinal);
+        await world.Proposed();
+        Assert.Equal("A grant of this application is already proposed.", (await director.Opens(url)).Page.QuerySelector(".why-not")!.TextContent);
+    }
+
+    [Fact]
+    public async Task Only_a_director_of_the_programme_comes_to_the_desk()
+    {
+        var (world, other) = (await site.NewWorld(), await site.NewWorld());
+        var id = await world.Proposed();
+        foreach (var person in new[] { world.Reader, other.Director, other.Trainee })
+        {
+            using var visitor = await world.As(person);
+            foreach (var url in new[] { $"/grants/{id}", $"/grants/{id}/signatures/new", $"/grants/{id}/endings/new", $"/grants/new?holder={world.Trainee.Id}&programme={world.Programme.Id}&application=cardiac" })
+                Assert.Equal(HttpStatusCode.NotFound, (await visitor.Opens(url)).Status);
+            Assert.DoesNotContain(Granting.Privilege, (await visitor.Opens("/grants")).Text, StringComparison.Ordinal);
+        }
+        using var holder = await world.As(world.Trainee);
+        Assert.Equal(HttpStatusCode.OK, (await holder.Opens($"/grants/{id}")).Status);
+        Assert.Equal(HttpStatusCode.NotFound, (await holder.Opens($"/grants/{id}/signatures/new")).Status);
+    }
+
+    [Fact]
+    public async Task A_grant_reads_its_ledger_aloud_and_the_holder_finds_the_paper()
+    {
+        var world = await site.NewWorld();
+        var (id, document) = await world.Signed();
+        using var holder = await world.As(world.Trainee);
+        await holder.Opens($"/grants/{id}");
+        Assert.Equal(3, holder.Page.QuerySelectorAll(".history li").Length);
+        Assert.Contains($"{world.Director.Name} signed (Granted) the grant of {Granting.Privilege}", holder.Text, StringComparison.Ordinal);
+        Assert.Contains("Trained elsewhere before.", holder.Text, StringComparison.Ordinal);
+        await holder.Opens($"/standings/{world.Trainee.Id}");
+        Assert.NotNull(holder.Page.QuerySelector($"a[href='/documents/{document.Id}']"));
+    }
+
+    [Theory]
+    [InlineData("/grants", 4)]
+    [InlineData("/grants/{0}", 4)]
+    [InlineData("/grants/{0}/signatures/new", 9)]
+    public async Task A_page_keeps_to_its_budget_of_queries(string url, int budget)
+    {
+        var world = await site.NewWorld();
+        for (var more = 0; more < 5; more++) await world.Read();
+        var id = await world.Proposed();
+        using var director = await world.As(world.Director);
+        var asked = await site.Queries.During(() => director.Opens(string.Format(null, url, id)));
+        Assert.Equal(HttpStatusCode.OK, director.Status);
+        Assert.True(asked.Count <= budget, $"{asked.Count} queries:\n{string.Join("\n\n", asked)}");
+    }
+}

@@ -1,0 +1,143 @@
+using Credtrack.Core.Grants;
+using Credtrack.Web.Features.Documents.Seals;
+using Microsoft.Extensions.DependencyInjection;
+
+namespace Credtrack.Web.Tests.Features.Grants.Signatures;
+
+public sealed class SignaturesTests(RunningSite site) : IClassFixture<RunningSite>
+{
+    [Fact]
+    public async Task What_is_met_is_signed_and_a_sealed_paper_comes_out()
+    {
+        var world = await site.NewWorld();
+        for (var n = 0; n < 3; n++) await world.Read();
+        var id = await world.Proposed();
+        using var director = await world.AtTheDesk(world.Director, id);
+        Assert.Empty(director.Page.QuerySelectorAll("[name='Form.GapReason']"));
+        var digest = director.Page.QuerySelector("[name='Form.Digest']")!.GetAttribute("value");
+        await director.Means().Fills("Your password, again", World.Password).Presses("Sign and seal");
+        Assert.Contains("Signed and sealed", director.Text, StringComparison.Ordinal);
+
+        var grant = await site.Ask(db => db.Grants.AsNoTracking().Include(g => g.Documents).SingleAsync(g => g.Id == id));
+        Assert.Equal((GrantState.Active, digest), (grant.State, grant.Signature!.Digest));
+        var document = Assert.Single(grant.Documents);
+        Assert.True(SealCheck.Of(document.Bytes, site.Services.GetRequiredService<SealingCertificate>().Trust).IsGood);
+        await director.Opens($"/documents/{document.Id}");
+        Assert.Equal(document.Bytes, await director.Response.Content.ReadAsByteArrayAsync());
+    }
+
+    [Fact]
+    public async Task Every_value_opens_into_as_many_scans()
+    {
+        var world = await site.NewWorld();
+        for (var n = 0; n < 2; n++) await world.Read();
+        await world.Read(2);
+        using var director = await world.AtTheDesk(world.Director, await world.Proposed());
+        var links = director.Page.QuerySelectorAll("tbody td a").Select(a => (Number: a.TextContent, Url: a.GetAttribute("href")!)).ToList();
+        Assert.Equal(["2", "3", "2"], links.Select(l => l.Number));
+        foreach (var (number, url) in links) Assert.Equal(number, $"{(await director.Opens(url)).Page.QuerySelectorAll(".scans li").Length}");
+    }
+
+    [Fact]
+    public async Task A_gap_a_wrong_password_and_a_missing_meaning_are_each_told_and_nothing_is_signed()
+    {
+        var world = await site.NewWorld();
+        var id = await world.Proposed();
+        using var director = await world.AtTheDesk(world.Director, id);
+        await director.Presses("Sign and seal");
+        Assert.Equal(HttpStatusCode.UnprocessableEntity, director.Status);
+        Assert.Equal(3, director.Page.QuerySelectorAll(".notice.bad a").Length);
+        await director.Means().Fills("Why you sign although not everything is met", "Trained elsewhere.").Fills("Your password, again", "wrong").Presses("Sign and seal");
+        Assert.Contains("This is not your password. Nothing was signed.", director.Text, StringComparison.Ordinal);
+        Assert.Equal("Trained elsewhere.", director.Typed("Why you sign although not everything is met"));
+        Assert.Empty(director.Typed("Your password, again"));
+        Assert.False(await site.Ask(db => db.Documents.AnyAsync(d => d.GrantId == id)));
+        await director.Fills("Your password, again", World.Password).Presses("Sign and seal");
+        Assert.Contains("Signed over a gap", director.Text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task A_letter_that_the_paper_cannot_print_is_named_before_anything_is_signed()
+    {
+        var world = await site.NewWorld();
+        var id = await world.Proposed();
+        using var director = await world.AtTheDesk(world.Director, id);
+        await director.Means().Fills("Why you sign although not everything is met", "訓練").Fills("Your password, again", World.Password).Presses("Sign and seal");
+        Assert.Equal(HttpStatusCode.UnprocessableEntity, director.Status);
+        Assert.Contains("訓", director.Page.QuerySelector(".notice.bad")!.TextContent, StringComparison.Ordinal);
+        Assert.False(await site.Ask(db => db.Documents.AnyAsync(d => d.GrantId == id)));
+    }
+
+    [Fact]
+    public async Task If_anything_moved_meanwhile_nothing_is_signed_and_the_difference_is_shown()
+    {
+        var world = await site.NewWorld();
+        var id = await world.Proposed();
+        using var director = await world.AtTheDesk(world.Director, id);
+        await world.Read();
+        await director.Means().Fills("Why you sign although not everything is met", "Trained elsewhere.").Fills("Your password, again", World.Password).Presses("Sign and seal");
+        Assert.Equal(HttpStatusCode.Conflict, director.Status);
+        Assert.Contains("scans that count: 0 is now scans that count: 1", director.Text, StringComparison.Ordinal);
+        Assert.Equal("Trained elsewhere.", director.Typed("Why you sign although not everything is met"));
+        await director.Fills("Your password, again", World.Password).Presses("Sign and seal");
+        Assert.Contains("Signed and sealed", director.Text, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task A_forged_digest_signs_nothing()
+    {
+        var world = await site.NewWorld();
+        using var director = await world.AtTheDesk(world.Director, await world.Proposed());
+        director.Page.QuerySelector("[name='Form.Digest']")!.SetAttribute("value", new string('0', 64));
+        await director.Means().Fills("Why you sign although not everything is met", "x").Fills("Your password, again", World.Password).Presses("Sign and seal");
+        Assert.Equal(HttpStatusCode.Conflict, director.Status);
+        Assert.False(await site.Ask(db => db.Set<Signature>().AnyAsync(s => s.SignerId == world.Director.Id)));
+    }
+
+    [Fact]
+    public async Task Of_two_directors_at_the_same_instant_exactly_one_signs_in_two_hundred_rounds()
+    {
+        var world = await site.NewWorld();
+        var second = await world.Another("Dee", MembershipKind.Director);
+        for (var round = 0; round < 200; round++)
+        {
+            var id = await world.Proposed();
+            var signed = await Task.WhenAll(Sign(world, id, world.Director), Sign(world, id, second));
+            Assert.Single(signed, won => won);
+            Assert.Equal(1, await site.Ask(db => db.Set<Signature>().CountAsync(s => s.GrantId == id)));
+        }
+    }
+
+    [Theory]
+    [InlineData("INSERT INTO Signatures (GrantId, Place, HolderId, SignerId, At, Meaning, Text, Digest) SELECT GrantId, Place, HolderId, SignerId, At, Meaning, Text, Digest FROM Signatures WHERE GrantId = {0}", "UNIQUE")]
+    [InlineData("INSERT INTO Signatures (GrantId, Place, HolderId, SignerId, At, Meaning, Text, Digest) SELECT GrantId, 2, HolderId, HolderId, At, Meaning, Text, Digest FROM Signatures WHERE GrantId = {0}", "CK_Signatures_not_ones_own")]
+    public async Task The_database_itself_refuses_a_second_signature_at_a_place_and_ones_own(string sql, string why)
+    {
+        var (id, _) = await (await site.NewWorld()).Signed();
+        var refused = await Assert.ThrowsAnyAsync<Exception>(() => site.Ask(db => db.Database.ExecuteSqlRawAsync(sql, id)));
+        Assert.Contains(why, refused.Message, StringComparison.Ordinal);
+    }
+
+    // A context each, loaded before either has saved as often as the machine will have it; whoever is later meets the version or the key.
+    private Task<bool> Sign(World world, Guid id, Person by) => Task.Run(() => site.Ask(async db =>
+    {
+        var grant = await db.Grants.SingleAsync(g => g.Id == id);
+        if (grant.WhyNotSign(by) is not null) return false;
+        var statement = new Statement("Site", "Holder", grant.HolderId, "Programme", "Privilege", "Application", new DateOnly(2026, 3, 1), 1, 1, 1, [], "Rules", 1, "trace");
+        grant.Sign(by, statement, Meaning.Granted, null, world.Now);
+        return await Saved(db);
+    }));
+
+    private static async Task<bool> Saved(CredtrackDb db)
+    {
+        try
+        {
+            await db.SaveChangesAsync();
+            return true;
+        }
+        catch (DbUpdateException)
+        {
+            return false;
+        }
+    }
+}
