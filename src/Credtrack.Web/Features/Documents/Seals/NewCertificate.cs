@@ -16,9 +16,13 @@ internal static class NewCertificate
     // Longer names are refused by readers: ub-organization-name of RFC 5280, appendix A.1.
     private const int LongestName = 64;
 
-    /// <summary>Key, certificate and root as PFX, good from <paramref name="at"/> on.</summary>
-    public static byte[] Make(string site, DateTime at, string? password)
+    // Clocks differ: what is sealed while the certificate is being made, or by a machine a little behind, is good too.
+    private static readonly TimeSpan Slack = TimeSpan.FromDays(1);
+
+    /// <summary>Key, certificate and root as PFX, good from a day before <paramref name="now"/> on.</summary>
+    public static byte[] Make(string site, DateTime now, string? password)
     {
+        var at = now - Slack;
         using var rootKey = RSA.Create(Bits);
         using var root = Root(rootKey, site, at);
         using var key = RSA.Create(Bits);

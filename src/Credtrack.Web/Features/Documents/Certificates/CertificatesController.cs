@@ -1,0 +1,13 @@
+using Credtrack.Web.Features.Documents.Seals;
+using Microsoft.AspNetCore.Authorization;
+
+namespace Credtrack.Web.Features.Documents.Certificates;
+
+/// <summary>The public certificates of the seal, for whoever wants to check a file without us. The key is not among them.</summary>
+[Route("documents/certificates")]
+[AllowAnonymous]
+public sealed class CertificatesController(SealingCertificate certificate) : Controller
+{
+    [HttpGet("")]
+    public IActionResult Index() => Content(certificate.Trust.Pem, "application/x-pem-file");
+}
