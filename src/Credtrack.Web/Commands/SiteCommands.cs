@@ -10,6 +10,7 @@ public static class SiteCommands
     public static async Task<int?> Run(string[] args, IServiceProvider services)
     {
         if (args is not [("check" or "verify") and var command, .. var rest]) return null;
+        if (command == "check" && rest.Length == 0) return await Check.Run(rest, Console.Out, Console.Error);
         await using var scope = services.CreateAsyncScope();
         var db = scope.ServiceProvider.GetRequiredService<CredtrackDb>();
         if (command == "verify") return await Verify.Run(rest, Console.Out, Console.Error, db);

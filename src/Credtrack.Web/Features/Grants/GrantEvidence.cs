@@ -20,13 +20,19 @@ public sealed record GrantEvidence(Grant Grant, string Holder, string Applicatio
         var findings = standing?.Findings.Where(f => f.Application == names.Code).ToList() ?? [];
         var statement = new Statement(site.Name, names.Holder, grant.HolderId, names.Programme, grant.Privilege, names.Application, today,
             findings.Count, findings.Count(f => f.Seen.IsRead), findings.Count(f => f.Verdict == Verdict.Counts),
-            Requirements(application), rulebook?.Name ?? "none", rulebook?.Edition ?? 0, Statement.Seal(findings)) { Required = application is null ? null : StandingLine.Of(standing!, application, names.Application).Depth?.Required };
+            Requirements(standing, application), rulebook?.Name ?? "none", rulebook?.Edition ?? 0, Statement.Seal(findings)) { Required = application is null ? null : StandingLine.Of(standing!, application, names.Application).Depth?.Required };
         return new(grant, names.Holder, names.Application, names.Code, application, statement);
     }
 
-    private static List<Evidenced> Requirements(ApplicationStanding? application) => application is null
-        ? [new("a rulebook that lists this application", "none does", false)]
-        : [.. application.Requirements.Select(r => new Evidenced(r.Asks, Value(r), r.Met))];
+    /// <summary>All that bears on this application: its own, those of the groups it belongs to, and those of the whole rulebook.</summary>
+    private static List<Evidenced> Requirements(Core.Measures.Standings.Standing? standing, ApplicationStanding? application)
+    {
+        if (standing is null || application is null) return [new("a rulebook that lists this application", "none does", false)];
+        var own = application.Requirements.Select(r => new Evidenced(r.Asks, Value(r), r.Met)).ToList();
+        if (own.Count == 0) own.Add(new("a scan that counts", application.Counted.ToString(CultureInfo.InvariantCulture), application.Met));
+        var groups = standing.Groups.Where(g => g.Rules.Applications.Contains(application.Code)).SelectMany(g => g.Requirements.Select(r => new Evidenced($"{g.Name}: {r.Asks}", Value(r), r.Met)));
+        return [.. own, .. groups, .. standing.Overall.Requirements.Select(r => new Evidenced(r.Asks, Value(r), r.Met))];
+    }
 
     private static string Value(RequirementStanding requirement) => requirement.Value is not { } value ? "nothing to take it from"
         : requirement.Missing is not null ? value.ToString(CultureInfo.InvariantCulture) : $"{(value * 100).ToString("0.#", CultureInfo.InvariantCulture)} %";

@@ -16,6 +16,7 @@ public sealed class BlindnessTests(RunningSite site) : IClassFixture<RunningSite
         var waiting = await world.Waiting();
         var other = await world.Another("Rhea", MembershipKind.Reader);
         var read = await ReadByAnother(world, other);
+        await ReturnedByAnother(world, other);
         using var reader = await world.As(world.Reader);
         var pages = await Visit(reader);
         Assert.Contains($"/scans/{waiting.Id}", pages.Keys);
@@ -75,6 +76,16 @@ public sealed class BlindnessTests(RunningSite site) : IClassFixture<RunningSite
             return await db.SaveChangesAsync();
         });
         return scan;
+    }
+
+    private async Task ReturnedByAnother(World world, Person other)
+    {
+        var scan = await world.Waiting();
+        await site.Ask(async db =>
+        {
+            (await db.Scans.SingleAsync(s => s.Id == scan.Id)).SendBack(other, $"The apical view. {World.Secret}", world.Now);
+            return await db.SaveChangesAsync();
+        });
     }
 
     private static async Task<Dictionary<string, string>> Visit(Visitor reader)

@@ -41,6 +41,8 @@ public sealed class PictureFiles(string folder)
         return File.Exists(path) ? new FileStream(path, FileMode.Open, FileAccess.Read, FileShare.Read | FileShare.Delete, 4096, useAsync: true) : null;
     }
 
+    public bool Has(string sha256) => File.Exists(PathOf(sha256));
+
     /// <summary>Removes a still; one that is not here is already gone.</summary>
     /// <exception cref="ArgumentException">The name is not 64 lower-case hexadecimal digits.</exception>
     public void Erase(string sha256)

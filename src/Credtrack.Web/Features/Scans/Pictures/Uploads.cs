@@ -41,8 +41,9 @@ public sealed class Uploads(PictureFiles files, IDataProtectionProvider protecti
         Taken = kept;
     }
 
-    private static KeptPicture? Found(string note, IDataProtector seal) =>
-        seal.Opened(note) is { } still ? new(note, JsonSerializer.Deserialize<StoredStill>(still)!) : null;
+    // The store forgets pictures of forms that were left lying for a day.
+    private KeptPicture? Found(string note, IDataProtector seal) =>
+        seal.Opened(note) is { } opened && JsonSerializer.Deserialize<StoredStill>(opened) is { } still && files.Has(still.Sha256) ? new(note, still) : null;
 
     private async Task<KeptPicture> Keep(StillImage still, IDataProtector seal)
     {

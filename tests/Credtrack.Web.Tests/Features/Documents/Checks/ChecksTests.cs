@@ -32,13 +32,13 @@ public sealed class ChecksTests(RunningSite site) : IClassFixture<RunningSite>
     {
         var (_, document) = await (await site.NewWorld()).Signed();
         var chance = new Random(20261201);
-        byte[][] forged = [[.. document.Bytes, (byte)'\n'], Changed(document.Bytes, chance), Changed(document.Bytes, chance), "no PDF"u8.ToArray(), []];
+        byte[][] forged = [[.. document.Bytes, (byte)'\n'], Changed(document.Bytes, chance), Changed(document.Bytes, chance), "no PDF"u8.ToArray()];
         foreach (var file in forged)
         {
             using var stranger = site.Visitor();
             await stranger.Opens("/documents/checks");
             await stranger.Attaches("Choose the PDF, or drop it here", file).Presses("Check it");
-            Assert.Contains(file.Length == 0 ? "Check a document" : No, stranger.Text, StringComparison.Ordinal);
+            Assert.Contains(No, stranger.Text, StringComparison.Ordinal);
             Assert.DoesNotContain(Stands, stranger.Text, StringComparison.Ordinal);
         }
     }
