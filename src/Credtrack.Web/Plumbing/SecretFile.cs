@@ -38,6 +38,13 @@ public static class SecretFile
         }
     }
 
+    /// <summary>A folder that the owner of the process alone can read (Unix), made if there is none.</summary>
+    public static void Folder(string path)
+    {
+        if (OperatingSystem.IsWindows()) Directory.CreateDirectory(path);
+        else if (!Directory.Exists(path)) Directory.CreateDirectory(path, Owners | UnixFileMode.UserExecute);
+    }
+
     /// <summary>Whether everybody on this machine may read or change the file (Unix).</summary>
     public static bool IsOpenToAll(string path) => !OperatingSystem.IsWindows() && (File.GetUnixFileMode(path) & Strangers) != 0;
 

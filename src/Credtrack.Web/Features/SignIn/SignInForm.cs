@@ -6,15 +6,15 @@ namespace Credtrack.Web.Features.SignIn;
 public sealed class SignInForm : IValidatableObject
 {
     // A well-formed hash of a word nobody knows: an unknown address costs as much time as a known one.
-    private static readonly string Nobody = new PasswordHasher<Account>().HashPassword(new Account(), Guid.NewGuid().ToString());
+    private static string? nobody;
 
     /// <summary>A demo person's own button; it counts only in demo mode.</summary>
     public Guid? PersonId { get; set; }
 
-    [Display(Name = "E-mail address"), StringLength(200, ErrorMessage = "An address has 200 characters at most.")]
+    [Display(Name = "E-mail address"), StringLength(Account.LongestAddress, ErrorMessage = "An address has 200 characters at most.")]
     public string? Address { get; set; }
 
-    [Display(Name = "Password"), DataType(DataType.Password), StringLength(200, ErrorMessage = "A password has 200 characters at most.")]
+    [Display(Name = "Password"), DataType(DataType.Password), StringLength(PasswordRule.Longest, ErrorMessage = "A password has 200 characters at most.")]
     public string? Password { get; set; }
 
     public string? ReturnUrl { get; set; }
@@ -26,14 +26,22 @@ public sealed class SignInForm : IValidatableObject
         if (string.IsNullOrEmpty(Password)) yield return new("Enter your password.", [nameof(Password)]);
     }
 
-    public async Task<Account?> Prove(SignInManager<Account> signIn)
+    /// <summary>The account, or what is wrong: said alike of an address that is unknown, one that has no password yet, and a wrong password.</summary>
+    public async Task<(Account? Account, string? Why)> Prove(UserManager<Account> accounts, PasswordPace pace, Func<Guid?, string> key)
     {
-        var account = await signIn.UserManager.FindByNameAsync(Address!.Trim());
-        if (account is null)
+        var account = await accounts.FindByNameAsync(Address!.Trim());
+        var wait = pace.WaitBefore(key(account?.Id));
+        if (wait > TimeSpan.Zero) return (null, PasswordPace.TooMany(wait));
+        if (account?.HasPassword != true)
         {
-            signIn.UserManager.PasswordHasher.VerifyHashedPassword(new Account(), Nobody, Password!);
-            return null;
+            nobody ??= accounts.PasswordHasher.HashPassword(new Account(), Guid.NewGuid().ToString());
+            accounts.PasswordHasher.VerifyHashedPassword(new Account(), nobody, Password!);
         }
-        return await signIn.UserManager.CheckPasswordAsync(account, Password!) ? account : null;
+        else if (await accounts.CheckPasswordAsync(account, Password!))
+        {
+            pace.Right(key(account.Id));
+            return (account, null);
+        }
+        return (null, "This address and password do not belong together. Check both and try again.");
     }
 }

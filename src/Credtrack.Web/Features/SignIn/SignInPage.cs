@@ -19,6 +19,7 @@ public sealed record SignInPage(SignInForm Form, IReadOnlyList<DemoPeople> Demo,
                                  select new DemoPersonLine(one.Key, one.First().Name, string.Join("; ", one.Select(r => r.YearGroup is null ? r.Programme : $"{r.YearGroup}, {r.Programme}")))
                      where lines.Any()
                      select new DemoPeople($"{kind}s", [.. lines]);
-        return new(form, [.. groups], DemoSite.Password);
+        var administrators = await db.Sites.SelectMany(s => s.Administrators).Where(a => a.EndedAt == null).Select(a => new DemoPersonLine(a.PersonId, a.Person.Name, "looks after the site, sees no scans")).ToListAsync();
+        return new(form, [.. groups, new("Administrators", administrators)], DemoSite.Password);
     }
 }

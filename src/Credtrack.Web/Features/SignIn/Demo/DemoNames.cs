@@ -3,6 +3,8 @@ namespace Credtrack.Web.Features.SignIn.Demo;
 /// <summary>Names invented for the demonstration; whoever bears one by chance is not meant.</summary>
 public static class DemoNames
 {
+    public const string Administrator = "Ottilie Brandreth-Moss";
+
     public static string[] EmergencyTrainees { get; } =
     [
         "Wrenna Ostholm", "Tobias Achterkamp", "Ngozi Adelambo", "Rocco Castellane", "Maren Eskildsen", "Jude Fennimore", "Ilse Vantongeren", "Cormac Dunleavy-Pell",

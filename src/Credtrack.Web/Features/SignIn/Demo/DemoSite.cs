@@ -25,11 +25,12 @@ public sealed class DemoSite(CredtrackDb db, PictureFiles pictures, Func<Issuing
     private async Task Build()
     {
         var start = now.AddYears(-3);
+        var administrator = Enrol(DemoNames.Administrator, start);
         director = Enrol("Dr Seraphine Okwuosa-Lund", start);
-        var site = Site.Found(director, "Brindlemoor General (invented)", "Europe/Dublin", start);
-        var applications = CatalogueEntry.Shipped.Select(entry => Application.List(director, entry, start)).ToList();
-        var emergency = Programme.Found(director, "Emergency medicine", start);
-        var medicine = Programme.Found(director, "Internal medicine", start);
+        var site = Site.Found(administrator, "Brindlemoor General (invented)", "Europe/Dublin", start);
+        var applications = CatalogueEntry.Shipped.Select(entry => Application.List(administrator, entry, start)).ToList();
+        var emergency = Programme.Found(administrator, "Emergency medicine", start);
+        var medicine = Programme.Found(administrator, "Internal medicine", start);
         director.Join(director, emergency, MembershipKind.Director, start);
         Member("Dr Caspian Rothermere-Vale", medicine, MembershipKind.Director, start);
         Member("Nuala Fitzmaurice-Hart", emergency, MembershipKind.Coordinator, start);
@@ -81,18 +82,9 @@ public sealed class DemoSite(CredtrackDb db, PictureFiles pictures, Func<Issuing
         var hash = new PasswordHasher<Account>().HashPassword(new Account(), Password);
         foreach (var person in people)
         {
-            person.OpenAccount(director, now);
-            var address = DemoNames.AddressOf(person.Name);
-            yield return new Account
-            {
-                Id = person.Id,
-                UserName = address,
-                NormalizedUserName = address.ToUpperInvariant(),
-                Email = address,
-                NormalizedEmail = address.ToUpperInvariant(),
-                PasswordHash = hash,
-                SecurityStamp = Guid.NewGuid().ToString("N"),
-            };
+            var account = Account.Open(person, DemoNames.AddressOf(person.Name), director, now);
+            account.PasswordHash = hash;
+            yield return account;
         }
     }
 }

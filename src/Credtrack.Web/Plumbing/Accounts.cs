@@ -1,0 +1,22 @@
+using Credtrack.Web.Plumbing.Mail;
+using Microsoft.AspNetCore.DataProtection;
+using Microsoft.AspNetCore.Identity;
+
+namespace Credtrack.Web.Plumbing;
+
+/// <summary>What signing in stands on.</summary>
+public static class Accounts
+{
+    /// <summary>PBKDF2 with SHA-512; OWASP's password storage sheet asks for 210,000 (from memory). An older hash is made anew at the next sign-in.</summary>
+    public const int HashRounds = 220_000;
+
+    public static void AddAccounts(this IServiceCollection services, Settings settings)
+    {
+        services.Configure<PasswordHasherOptions>(options => options.IterationCount = HashRounds);
+        SecretFile.Folder(settings.KeyFolder);
+        services.AddDataProtection().SetApplicationName("Credtrack").PersistKeysToFileSystem(new DirectoryInfo(settings.KeyFolder));
+        services.AddSingleton<PasswordPace>().AddSingleton<KnownDevice>().AddSingleton(settings.Mail);
+        if (settings.Mail.Host is null) services.AddSingleton<IPost, FolderPost>();
+        else services.AddSingleton<IPost, ServerPost>();
+    }
+}
