@@ -20,7 +20,8 @@ public static class Invite
             await error.WriteLineAsync(Usage);
             return 2;
         }
-        await Write(services, output);
+        await using var scope = services.CreateAsyncScope();
+        await Write(scope.ServiceProvider, output);
         return 0;
     }
 

@@ -10,10 +10,10 @@ public static class SiteCommands
     public static async Task<int?> Run(string[] args, IServiceProvider services)
     {
         if (args is not [("check" or "verify" or "invite") and var command, .. var rest]) return null;
+        if (command == "invite") return await Invite.Run(rest, Console.Out, Console.Error, services);
         if (command == "check" && rest.Length == 0) return await Check.Run(rest, Console.Out, Console.Error);
         await using var scope = services.CreateAsyncScope();
         var db = scope.ServiceProvider.GetRequiredService<CredtrackDb>();
-        if (command == "invite") return await Invite.Run(rest, Console.Out, Console.Error, scope.ServiceProvider);
         if (command == "verify") return await Verify.Run(rest, Console.Out, Console.Error, db);
         return await Check.Run(rest, Console.Out, Console.Error, services.GetRequiredService<SealingCertificate>().Trust, sha256 => Find(db, sha256));
     }
