@@ -10,7 +10,8 @@ public sealed record SignedOver(Guid GrantId, string Privilege, DateTime SignedA
         if (scan.Withdrawal is not { } withdrawal) return [];
         var (application, since) = (scan.Readings.MinBy(r => r.Number)?.ApplicationId ?? scan.ApplicationId, scan.Submissions.Min(s => s.At));
         return await db.GrantsVisibleTo(viewer).Where(g => g.HolderId == scan.TraineeId && g.ApplicationId == application)
-            .SelectMany(g => g.Signatures.Where(s => s.At >= since && s.At <= withdrawal.At), (g, s) => new SignedOver(g.Id, g.Privilege, s.At)).OrderBy(s => s.SignedAt).Take(20).ToListAsync();
+            .SelectMany(g => g.Signatures.Where(s => s.At >= since && s.At <= withdrawal.At), (g, s) => new { g.Id, g.Privilege, s.At })
+            .OrderBy(s => s.At).Take(20).Select(s => new SignedOver(s.Id, s.Privilege, s.At)).ToListAsync();
     }
 
     /// <summary>How many scans of the evidence were withdrawn after a grant was signed over it.</summary>
