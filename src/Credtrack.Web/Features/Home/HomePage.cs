@@ -30,7 +30,8 @@ public sealed record HomePage(IReadOnlyList<ToDoLine>? ToDo, int Waiting, Standi
             .Select(s => new { Scan = s, Application = s.Application.Name }).ToListAsync();
         var waiting = await own.CountAsync(s => s.Submissions.Any(x => x.Return == null));
         var standing = await StandingPage.Load(db, me, person.Id, new StandingQuery(null, null, null, null), today);
-        var todo = open.Select(o => new ToDoLine(o.Scan.Id, o.Application, o.Scan.PerformedAt, o.Scan.State, o.Scan.ReturnedWith?.Missing ?? (o.Scan.State == ScanState.Waiting ? o.Scan.WhyIncomplete : null))).OrderByDescending(t => t.State);
+        var todo = open.Select(o => new ToDoLine(o.Scan.Id, o.Application, o.Scan.PerformedAt, o.Scan.State, o.Scan.ReturnedWith?.Missing ?? (o.Scan.State == ScanState.Waiting ? o.Scan.WhyIncomplete : null)))
+            .Where(t => t.State != ScanState.Waiting || t.Missing is not null).OrderByDescending(t => t.State);
         return new([.. todo], waiting, standing?.NearestGaps.FirstOrDefault(), bench, programmes);
     }
 

@@ -11,7 +11,7 @@ public sealed class ConfirmationsTests(RunningSite site) : IClassFixture<Running
         var scan = await ReadByAnother(world);
         using var supervisor = await world.As(world.Reader);
         Assert.Contains("1 scan names you as direct supervisor.", supervisor.Text, StringComparison.Ordinal);
-        Assert.Equal([$"{world.Trainee.Name}Focused cardiac", "Sun 1 Mar 2026, 11:00"], supervisor.Page.QuerySelectorAll(".rows li > span").Select(s => s.TextContent));
+        Assert.Equal([$"{world.Trainee.Name}Focused cardiacSun 1 Mar 2026, 11:00"], supervisor.Page.QuerySelectorAll(".rows li > span").Select(s => s.TextContent));
         using var trainee = await world.As(world.Trainee);
         Assert.Contains("0 scans count", (await trainee.Opens("/standings")).Text, StringComparison.Ordinal);
         Assert.Equal("Not yet; until then it counts as read later", await Confirmed(trainee, scan));
