@@ -14,6 +14,7 @@ public static class Evidence
         var scans = await db.Scans.IgnoreAutoIncludes().Where(s => people.Contains(s.TraineeId) && s.Withdrawal == null && s.Submissions.Any()).Select(s => new
         {
             s.Id, s.TraineeId, s.Application.Code, s.Subtype, s.PerformedAt, s.Encounter, s.Role, s.Setting, s.Indicated, s.Supervision, s.SupervisorId, s.Assisted,
+            WasThere = s.Confirmations.Where(c => c.SupervisorId == s.SupervisorId && c.ApplicationId == s.ApplicationId && c.PerformedAt == s.PerformedAt).Select(c => (bool?)c.WasThere).FirstOrDefault(),
         }).ToListAsync();
         var governing = await db.Readings.IgnoreAutoIncludes().Where(r => people.Contains(r.TraineeId) && r.Number == 1).Select(r => new
         {
@@ -21,9 +22,9 @@ public static class Evidence
         }).ToDictionaryAsync(r => r.ScanId);
         return scans.Select(s => (s.TraineeId, Evidence: governing.TryGetValue(s.Id, out var read)
             ? new ScanEvidence(s.Id.ToString(), read.Code, read.Subtype, s.PerformedAt, s.Encounter, s.Role, s.Setting, read.Indicated,
-                Supervisions.Counting(s.Supervision, s.SupervisorId, read.ReaderId, read.AtMost), read.Assisted, read.Reading, null)
+                Supervisions.Counting(s.Supervision, s.SupervisorId, read.ReaderId, read.AtMost, s.WasThere), read.Assisted, read.Reading, null)
             : new ScanEvidence(s.Id.ToString(), s.Code, s.Subtype, s.PerformedAt, s.Encounter, s.Role, s.Setting, s.Indicated,
-                Supervisions.Counting(s.Supervision, s.SupervisorId, null, null), s.Assisted, null, null)))
+                Supervisions.Counting(s.Supervision, s.SupervisorId, null, null, s.WasThere), s.Assisted, null, null)))
             .ToLookup(s => s.TraineeId, s => s.Evidence);
     }
 

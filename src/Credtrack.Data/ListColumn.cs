@@ -1,6 +1,7 @@
 using System.Text.Json;
 using System.Text.Json.Serialization;
 using Credtrack.Core.Catalogue;
+using Credtrack.Core.Readings;
 using Microsoft.EntityFrameworkCore.ChangeTracking;
 
 namespace Credtrack.Data;
@@ -8,7 +9,7 @@ namespace Credtrack.Data;
 /// <summary>A short list that is only ever read and replaced whole lies in one bounded text column as JSON.</summary>
 internal static class ListColumn
 {
-    public static Type[] Listed { get; } = [typeof(View), typeof(MarkedView), typeof(Question), typeof(Answered)];
+    public static Type[] Listed { get; } = [typeof(View), typeof(MarkedView), typeof(Question), typeof(Answered), typeof(Judged)];
 
     private const int Longest = 8000;
 
@@ -26,4 +27,8 @@ internal static class ListColumn
             new ValueComparer<IReadOnlyList<T>>((a, b) => a!.SequenceEqual(b!), values => values.Aggregate(0, (hash, v) => HashCode.Combine(hash, v)), values => values));
         return list;
     }
+
+    /// <summary>The same for one record that is kept as it was: two lists and what else it holds.</summary>
+    public static PropertyBuilder<Judged> AsText(this PropertyBuilder<Judged> kept) =>
+        kept.HasMaxLength(2 * Longest + Judgement.LongestFeedback * 2).HasConversion(value => JsonSerializer.Serialize(value, Compact), text => JsonSerializer.Deserialize<Judged>(text, Compact)!);
 }

@@ -1,3 +1,5 @@
+using Credtrack.Core.People;
+
 namespace Credtrack.Core.Scans;
 
 /// <summary>A still of a scan. Its bytes lie in the picture store under their SHA-256; the name of the uploaded file is never kept.</summary>
@@ -11,7 +13,11 @@ public sealed class Picture
     public int Height { get; private init; }
     public DateTime At { get; private init; }
     public Guid? RemovedById { get; private set; }
+    public Person? RemovedBy { get; private init; }
     public DateTime? RemovedAt { get; private set; }
+
+    /// <summary>What others than its trainee say when they take a picture out.</summary>
+    public string? RemovedBecause { get; private set; }
 
     private Picture() { }
 
@@ -21,7 +27,7 @@ public sealed class Picture
         (ScanId, Number, Sha256, Width, Height, At) = (scan.Id, number, still.Sha256, still.Width, still.Height, at);
     }
 
-    internal void Remove(Guid by, DateTime at) => (RemovedById, RemovedAt) = (by, at);
+    internal void Remove(Guid by, string? because, DateTime at) => (RemovedById, RemovedBecause, RemovedAt) = (by, because, at);
 }
 
 /// <summary>Width and height in pixels.</summary>

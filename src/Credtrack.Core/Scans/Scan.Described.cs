@@ -26,14 +26,14 @@ public sealed partial class Scan
         .. Answers.Select(a => (a.Text.TrimEnd('?'), a.Given?.ToString() ?? "open")),
     ];
 
-    private static string Difference(List<(string Name, string Value)> before, List<(string Name, string Value)> after) => string.Join("; ",
+    internal static string Difference(List<(string Name, string Value)> before, List<(string Name, string Value)> after) => string.Join("; ",
         from now in after
         let then = before.FirstOrDefault(b => b.Name == now.Name).Value
         where then != now.Value
-        select now.Name is "note" or "application" or "supervisor" ? $"another {now.Name}"
+        select now.Name is "note" or "application" or "supervisor" or "feedback" ? $"another {now.Name}"
             : then is null ? $"{now.Name}: {now.Value}"
             : $"{now.Name} from {then} to {now.Value}");
 
-    private static string Said(bool yes) => yes ? "yes" : "no";
+    internal static string Said(bool yes) => yes ? "yes" : "no";
     private static string Said(int? number) => number?.ToString(CultureInfo.InvariantCulture) ?? "none";
 }

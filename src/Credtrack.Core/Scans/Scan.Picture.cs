@@ -1,4 +1,5 @@
 using Credtrack.Core.People;
+using Credtrack.Core.Plumbing;
 
 namespace Credtrack.Core.Scans;
 
@@ -21,9 +22,27 @@ public sealed partial class Scan
         Record(new PictureAttached(by, at, picture.Number));
     }
 
+    /// <summary>Those that others took out, each with the reason.</summary>
+    public IEnumerable<Picture> TakenOutPictures => pictures.Where(p => p.RemovedBecause is not null).OrderBy(p => p.Number);
+
+    public string? WhyNotTakeOut(Person by, Picture picture) =>
+          by.Id == TraineeId               ? "Of a scan of your own, take pictures off by changing it."
+        : !(by.Is(MembershipKind.Coordinator, ProgrammeId) || by.Is(MembershipKind.Reader, ProgrammeId)) ? "Only this programme's coordinators and readers take a picture out."
+        : submissions.Count == 0           ? "This scan is a draft; nobody else sees it."
+        : picture.RemovedAt is not null    ? "This picture is removed already."
+        : null;
+
+    /// <summary>A patient named in a picture must not stay there, whatever the state of the scan. Its bytes go once this is saved; the fact stays.</summary>
+    public void TakeOut(Person by, Picture picture, string reason, DateTime at)
+    {
+        RuleBroken.If(WhyNotTakeOut(by, picture) ?? FreeText.WhyNotReason(reason));
+        picture.Remove(by.Id, reason, at);
+        Record(new PictureTakenOut(by, at, picture.Number));
+    }
+
     private void Remove(Person by, Picture picture, DateTime at)
     {
-        picture.Remove(by.Id, at);
+        picture.Remove(by.Id, null, at);
         Record(new PictureRemoved(by, at, picture.Number));
     }
 }

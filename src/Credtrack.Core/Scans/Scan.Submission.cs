@@ -1,5 +1,6 @@
 using Credtrack.Core.Catalogue;
 using Credtrack.Core.People;
+using Credtrack.Core.Plumbing;
 
 namespace Credtrack.Core.Scans;
 
@@ -16,7 +17,7 @@ public sealed partial class Scan
             yield return (nameof(Pictures), "Attach a picture, or name who supervised at the bedside: without pictures only that person can read the scan.");
     }
 
-    public string? WhyIncomplete => Missing(Answers, ShownPictures.Count(), Supervision == Supervision.Direct).Select(m => m.Why).FirstOrDefault();
+    public string? WhyIncomplete => Missing(Answers, ShownPictures.Count(), IsSupervised).Select(m => m.Why).FirstOrDefault();
 
     public string? WhyNotSubmit(Person by) =>
           by.Id != TraineeId          ? "Only the person who logged a scan submits it."
@@ -36,7 +37,21 @@ public sealed partial class Scan
     public void Discard(Person by, DateTime at)
     {
         RuleBroken.If(WhyNotDiscard(by));
-        Withdrawal = new Withdrawal(this, by, at);
+        Withdrawal = new Withdrawal(this, by, null, at);
         Record(new DraftDiscarded(by, at));
+    }
+
+    public string? WhyNotWithdraw(Person by) =>
+          by.Id != TraineeId         ? "Only the person who logged a scan withdraws it."
+        : Withdrawal is not null     ? "This scan is withdrawn."
+        : submissions.Count == 0     ? "This scan is a draft: discard it, there is nothing to withdraw."
+        : null;
+
+    /// <summary>Gone from the standing of every day, whatever stands in it. What was signed before keeps its evidence.</summary>
+    public void Withdraw(Person by, string reason, DateTime at)
+    {
+        RuleBroken.If(WhyNotWithdraw(by) ?? FreeText.WhyNotReason(reason));
+        Withdrawal = new Withdrawal(this, by, reason, at);
+        Record(new ScanWithdrawn(by, at));
     }
 }

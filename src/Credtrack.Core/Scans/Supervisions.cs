@@ -3,12 +3,14 @@ namespace Credtrack.Core.Scans;
 public static class Supervisions
 {
     /// <summary>
-    /// The supervision that counts. Direct supervision counts as later until the person named confirms it by reading the scan;
-    /// a reader may have lowered it.
+    /// The supervision that counts. Direct supervision counts as later until the person named confirms it, by saying so or by reading the scan,
+    /// and for good where that person says not to have been there; a reader may have lowered it.
     /// </summary>
-    public static Supervision Counting(Supervision said, Guid? supervisorId, Guid? readerId, Supervision? atMost)
+    /// <param name="wasThere">what the person named has said; null while nothing</param>
+    public static Supervision Counting(Supervision said, Guid? supervisorId, Guid? readerId, Supervision? atMost, bool? wasThere = null)
     {
-        var confirmed = said == Supervision.Direct && (supervisorId is null || supervisorId != readerId) ? Supervision.Later : said;
-        return atMost < confirmed ? atMost.Value : confirmed;
+        var confirmed = supervisorId is not null && (wasThere ?? supervisorId == readerId);
+        var counting = said == Supervision.Direct && !confirmed ? Supervision.Later : said;
+        return atMost < counting ? atMost.Value : counting;
     }
 }

@@ -1,4 +1,5 @@
 using Credtrack.Core.People;
+using Credtrack.Core.Plumbing;
 using Credtrack.Core.Scans;
 
 namespace Credtrack.Data.Maps;
@@ -27,6 +28,7 @@ internal sealed class SubmissionMap : IEntityTypeConfiguration<Submission>, IEnt
     {
         withdrawal.ToTable("Withdrawals");
         withdrawal.HasKey(w => w.ScanId);
+        withdrawal.Property(w => w.Reason).HasMaxLength(FreeText.Longest);
         withdrawal.HasOne<Person>().WithMany().HasForeignKey(w => w.ById);
     }
 }

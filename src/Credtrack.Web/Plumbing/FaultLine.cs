@@ -33,4 +33,10 @@ public sealed class FaultLine : TagHelper
 public static class Faults
 {
     public static bool ContainsFault(this ModelStateDictionary form, params IEnumerable<string> names) => names.Any(name => form.GetValueOrDefault(name)?.Errors.Count > 0);
+
+    /// <summary>What the core finds wrong goes to the field of that name.</summary>
+    public static void Tell(this ModelStateDictionary form, IEnumerable<(string About, string Why)> faults)
+    {
+        foreach (var (about, why) in faults) form.AddModelError($"Form.{about}", why);
+    }
 }

@@ -6,7 +6,7 @@ namespace Credtrack.Browser.Tests.Site;
 /// </summary>
 public sealed record Place(string Name, string? Who, string Shows, Func<Visitor, Task> Reach)
 {
-    private const string Trainee = "Wrenna Ostholm", Drafter = "Maren Eskildsen", Reader = "Dr Halvard Quill", Director = "Dr Seraphine Okwuosa-Lund";
+    private const string Trainee = "Wrenna Ostholm", Drafter = "Maren Eskildsen", Reader = "Dr Halvard Quill", Director = "Dr Seraphine Okwuosa-Lund", Coordinator = "Nuala Fitzmaurice-Hart";
     private const string Attention = "This needs your attention";
 
     private static readonly Place[] All =
@@ -46,6 +46,19 @@ public sealed record Place(string Name, string? Who, string Shows, Func<Visitor,
         new("bench, all unfolded", Reader, "To the first question that is open", async v => { await v.Opens("/readings"); await v.Unfolds("Confirm or correct what was entered"); await v.Page.Keyboard.PressAsync("?"); }),
         new("return", Reader, "What is missing?", async v => { await v.Opens("/readings"); await v.Follows("Return it"); }),
         new("return with errors", Reader, Attention, async v => { await v.Opens("/readings"); await v.Follows("Return it"); await v.Presses("Return it to the trainee"); }),
+        new("own scan that was withdrawn", Trainee, "it counts on no day", v => FirstScan(v, "Withdrawn")),
+        new("withdraw a scan", Trainee, "A withdrawn scan counts on no day", async v => { await FirstScan(v, "Read"); await v.Follows("Withdraw it"); }),
+        new("withdraw with errors", Trainee, Attention, async v => { await FirstScan(v, "Read"); await v.Follows("Withdraw it"); await v.Presses("Withdraw this scan"); }),
+        new("remove a picture", Coordinator, "The picture is erased", async v => { await FirstScan(v, "Read"); await v.Follows("Remove picture 1"); }),
+        new("remove with errors", Coordinator, Attention, async v => { await FirstScan(v, "Read"); await v.Follows("Remove picture 1"); await v.Presses("Remove this picture"); }),
+        new("follow-ups", Director, "Discrepancies that touch", v => v.Opens("/follow-ups")),
+        new("follow-up that is open", Director, "What it is about", OpenFollowUp),
+        new("follow-up that is closed", Director, "They had seen it too.", async v => { await v.Opens("/follow-ups"); await v.Follows("Look at it"); }),
+        new("close a follow-up", Director, "This closes the follow-up", async v => { await OpenFollowUp(v); await v.Follows("Write who was told"); }),
+        new("close with errors", Director, Attention, async v => { await OpenFollowUp(v); await v.Follows("Write who was told"); await v.Presses("Close this follow-up"); }),
+        new("scan that touches care, to its reader", Reader, "Correct your reading", OwnReading),
+        new("correct a reading", Reader, "Why do you correct it?", async v => { await OwnReading(v); await v.Follows("Correct your reading"); }),
+        new("correct with errors", Reader, Attention, async v => { await OwnReading(v); await v.Follows("Correct your reading"); await v.Presses("Correct this reading"); }),
         new("what does not exist", Trainee, "There is nothing here", v => v.Opens("/scans/none")),
     ];
 
@@ -65,6 +78,18 @@ public sealed record Place(string Name, string? Who, string Shows, Func<Visitor,
     {
         await visitor.Opens($"/scans?state={state}");
         await visitor.Follows(visitor.Page.GetByRole(AriaRole.Region, new() { Name = "Newest first" }).GetByRole(AriaRole.List).GetByRole(AriaRole.Link).First);
+    }
+
+    private static async Task OpenFollowUp(Visitor visitor)
+    {
+        await visitor.Opens("/follow-ups");
+        await visitor.Follows("Open it");
+    }
+
+    private static async Task OwnReading(Visitor visitor)
+    {
+        await OpenFollowUp(visitor);
+        await visitor.Follows("Open the scan");
     }
 
     private static async Task Evidence(Visitor visitor)

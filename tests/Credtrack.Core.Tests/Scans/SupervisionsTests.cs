@@ -33,4 +33,16 @@ public sealed class SupervisionsTests
         Assert.Equal(counting, Supervisions.Counting(said, null, null, null));
         Assert.Equal(counting, Supervisions.Counting(said, null, Another, Supervision.Direct));
     }
+
+    [Theory] // what counts where a yes or a no was said, and the reader lets at most None, Later, Direct stand
+    [InlineData(Supervision.Direct, true, "Direct None Later Direct")]
+    [InlineData(Supervision.Direct, false, "Later None Later Later")]
+    [InlineData(Supervision.Later, true, "Later None Later Later")]
+    [InlineData(Supervision.None, true, "None None None None")]
+    public void A_yes_confirms_and_raises_nothing_and_a_no_outweighs_an_own_reading(Supervision said, bool wasThere, string counting)
+    {
+        Supervision?[] limits = [null, Supervision.None, Supervision.Later, Supervision.Direct];
+        foreach (var reader in new Guid?[] { null, Named, Another })
+            Assert.Equal(counting, string.Join(' ', limits.Select(atMost => Supervisions.Counting(said, Named, reader, atMost, wasThere))));
+    }
 }

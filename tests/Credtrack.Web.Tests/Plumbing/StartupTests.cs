@@ -1,3 +1,4 @@
+using Credtrack.Core.Scans;
 using Credtrack.Migrations.Sqlite;
 using Credtrack.Web.Features.Scans.Pictures;
 using Microsoft.AspNetCore.Hosting;
@@ -42,6 +43,21 @@ public sealed class StartupTests
             Assert.True(File.Exists(PathOf(fresh.Sha256)));
             Assert.False(File.Exists(PathOf(abandoned.Sha256)));
         }
+    }
+
+    [Fact]
+    public async Task A_picture_whose_erasure_a_crash_cut_off_is_gone_at_the_next_start()
+    {
+        var (file, still) = (BlankSite.NewCopy(), await Still(14));
+        using (var site = new StartedOn(file))
+        {
+            var world = await site.NewWorld();
+            await site.Services.GetRequiredService<PictureFiles>().Keep(still);
+            var scan = await world.With(await world.Waiting(), s => s.Attach(world.Trainee, new StoredStill(still.Sha256, still.Width, still.Height), world.Now));
+            await world.With(scan, s => s.TakeOut(world.Reader, s.Pictures.Single(p => p.Number == 2), "A name can be read.", world.Now));
+            Assert.True(File.Exists(PathOf(still.Sha256)));
+        }
+        using (new StartedOn(file)) Assert.False(File.Exists(PathOf(still.Sha256)));
     }
 
     private static string PathOf(string sha256) => Path.Combine(BlankSite.Folder, "own", sha256[..2], $"{sha256}.jpg");

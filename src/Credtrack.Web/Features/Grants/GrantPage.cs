@@ -6,6 +6,8 @@ namespace Credtrack.Web.Features.Grants;
 public sealed record GrantPage(
     Grant Grant, string Holder, string Application, string Programme, string ProposedBy, Guid? DocumentId, string? DocumentCode, IReadOnlyList<HistoryLine> History, Person Viewer)
 {
+    /// <summary>Scans of the evidence that were withdrawn after the signature.</summary>
+    public int WithdrawnSince { get; init; }
     public bool IsDirector => Viewer.Is(MembershipKind.Director, Grant.ProgrammeId);
     public string? WhyNotSign => Grant.WhyNotSign(Viewer);
     public string? WhyNotEnd => Grant.WhyNotEnd(Viewer);
@@ -22,6 +24,9 @@ public sealed record GrantPage(
             Document = g.Documents.Select(d => new { d.Id, d.Code }).FirstOrDefault(),
         }).SingleOrDefaultAsync();
         if (row is null) return null;
-        return new(row.Grant, row.Holder, row.Application, row.Programme, row.ProposedBy, row.Document?.Id, row.Document?.Code, await HistoryLine.Of(db, id), me.Person);
+        return new(row.Grant, row.Holder, row.Application, row.Programme, row.ProposedBy, row.Document?.Id, row.Document?.Code, await HistoryLine.Of(db, id), me.Person)
+        {
+            WithdrawnSince = row.Grant.Signature is { } signed ? await SignedOver.WithdrawnSince(db, row.Grant.HolderId, row.Grant.ApplicationId, signed.At) : 0,
+        };
     }
 }

@@ -12,18 +12,26 @@ public sealed record ProgrammeLine(string Name, int Trainees, int Waiting, DateT
 /// <summary>What is to be done, each membership's part on its own; a part that does not concern the person is null.</summary>
 public sealed record HomePage(IReadOnlyList<ToDoLine>? ToDo, int Waiting, StandingLine? NearestGap, Bench? Bench, IReadOnlyList<ProgrammeLine> Programmes)
 {
-    public static async Task<HomePage> Load(CredtrackDb db, Me me, DateOnly today)
+    public OpenCare Care { get; init; } = OpenCare.None;
+    public ToConfirm Supervised { get; init; } = ToConfirm.None;
+
+    public static async Task<HomePage> Load(CredtrackDb db, Me me, DateOnly today) =>
+        await ByMembership(db, me, today) with { Care = await OpenCare.Load(db, me.Person), Supervised = await ToConfirm.Load(db, me.Person) };
+
+    private static async Task<HomePage> ByMembership(CredtrackDb db, Me me, DateOnly today)
     {
         var person = me.Person;
         var programmes = await Led(db, person, today);
         var bench = person.Is(MembershipKind.Reader) ? await Bench.Load(db, person) : null;
         if (!person.Is(MembershipKind.Trainee)) return new(null, 0, null, bench, programmes);
-        var own = db.ScansVisibleTo(person).AsNoTracking().Where(s => s.TraineeId == person.Id && !s.Readings.Any());
-        var open = await own.OrderByDescending(s => s.PerformedAt).Where(s => !s.Submissions.Any(x => x.Return == null)).Take(20)
+        var own = db.ScansVisibleTo(person).Standing().AsNoTracking().Where(s => s.TraineeId == person.Id && !s.Readings.Any());
+        // A scan whose pictures were taken out waits for nobody until it has another.
+        var open = await own.OrderByDescending(s => s.PerformedAt).Where(s => !s.Submissions.Any(x => x.Return == null) || (s.Pictures.All(p => p.RemovedAt != null) && (s.SupervisorId == null || s.Confirmations.Any(c => !c.WasThere)))).Take(20)
             .Select(s => new { Scan = s, Application = s.Application.Name }).ToListAsync();
         var waiting = await own.CountAsync(s => s.Submissions.Any(x => x.Return == null));
         var standing = await StandingPage.Load(db, me, person.Id, new StandingQuery(null, null, null, null), today);
-        var todo = open.Select(o => new ToDoLine(o.Scan.Id, o.Application, o.Scan.PerformedAt, o.Scan.State, o.Scan.ReturnedWith?.Missing)).OrderByDescending(t => t.State);
+        var todo = open.Select(o => new ToDoLine(o.Scan.Id, o.Application, o.Scan.PerformedAt, o.Scan.State, o.Scan.ReturnedWith?.Missing ?? (o.Scan.State == ScanState.Waiting ? o.Scan.WhyIncomplete : null)))
+            .Where(t => t.State != ScanState.Waiting || t.Missing is not null).OrderByDescending(t => t.State);
         return new([.. todo], waiting, standing?.NearestGaps.FirstOrDefault(), bench, programmes);
     }
 

@@ -8,6 +8,9 @@ public sealed record Bench(int Position, int Length, DateTime? OldestSince, Guid
     /// <summary>More than anybody reads in a row; those after it come up as the first ones are read.</summary>
     private const int Most = 1000;
 
+    /// <summary>For a scan that is looked at away from the bench.</summary>
+    public static Bench None { get; } = new(0, 0, null, null);
+
     public static async Task<Bench> Load(CredtrackDb db, Person reader, Scan? at = null)
     {
         var queue = await db.ScansWaitingFor(reader)

@@ -28,9 +28,10 @@ public sealed class ScanPageTests(RunningSite site) : IClassFixture<RunningSite>
 
     [Theory]
     [InlineData(ScanState.Draft, "Submit for reading, Change it, Discard the draft", "A draft: nobody else sees it until you submit it.")]
-    [InlineData(ScanState.Waiting, "Change it", "Waits for a reading since Sun 1 Mar 2026.")]
-    [InlineData(ScanState.Returned, "Submit for reading, Change it", "Returned: something is missing. Add it and submit again.")]
-    [InlineData(ScanState.Read, "", "image quality 4 of 5")]
+    [InlineData(ScanState.Waiting, "Change it, Withdraw it", "Waits for a reading since Sun 1 Mar 2026.")]
+    [InlineData(ScanState.Returned, "Submit for reading, Change it, Withdraw it", "Returned: something is missing. Add it and submit again.")]
+    [InlineData(ScanState.Read, "Withdraw it", "image quality 4 of 5")]
+    [InlineData(ScanState.Withdrawn, "", "Withdrawn Sun 1 Mar 2026 by you: it counts on no day.")]
     public async Task Each_state_says_what_it_means_and_offers_what_can_be_done(ScanState state, string offered, string words)
     {
         var world = await site.NewWorld();
@@ -39,6 +40,7 @@ public sealed class ScanPageTests(RunningSite site) : IClassFixture<RunningSite>
             ScanState.Draft => await world.Draft(),
             ScanState.Waiting => await world.Waiting(),
             ScanState.Returned => await world.Returned(),
+            ScanState.Withdrawn => await world.Withdrawn(await world.Waiting()),
             _ => await world.Read(),
         };
         using var trainee = await (await world.As(world.Trainee)).Opens($"/scans/{scan.Id}");

@@ -41,6 +41,9 @@ public sealed class Uploads(PictureFiles files, IDataProtectionProvider protecti
         Taken = kept;
     }
 
+    /// <summary>What was taken off a scan loses its bytes.</summary>
+    public Task EraseRemoved(CredtrackDb db, Scan scan) => db.EraseUnused(files, [.. scan.Pictures.Where(p => p.RemovedAt is not null).Select(p => p.Sha256).Distinct()]);
+
     // The store forgets pictures of forms that were left lying for a day.
     private KeptPicture? Found(string note, IDataProtector seal) =>
         seal.Opened(note) is { } opened && JsonSerializer.Deserialize<StoredStill>(opened) is { } still && files.Has(still.Sha256) ? new(note, still) : null;

@@ -47,6 +47,7 @@ public sealed class DemoSite(CredtrackDb db, PictureFiles pictures, Func<Issuing
         db.AddRange(Accounts());
         await db.SaveChangesAsync();
         await new DemoScans(db, pictures, people, applications, now).Build([emergency, medicine]);
+        await DemoCorrections.Build(db, people, now);
         // Only now: the certificate of the seal bears the name of the site.
         await DemoGrants.Build(db, issuing(), site, director, emergency, now);
     }

@@ -73,7 +73,7 @@ public sealed class PicturesTests(RunningSite site) : IClassFixture<RunningSite>
         var file = await site.Ask(db => Task.FromResult(db.Database.GetDbConnection().DataSource));
         foreach (var part in new[] { file, $"{file}-wal" }.Where(File.Exists)) Assert.False(Holds(part, "smith"), $"{part} holds the name of the file");
         Assert.True(Holds(file, world.Trainee.Name) || Holds($"{file}-wal", world.Trainee.Name)); // so that the search finds what is there
-        Assert.DoesNotContain(Directory.EnumerateFiles(Path.Combine(BlankSite.Folder, "pictures"), "*", SearchOption.AllDirectories), f => f.Contains("smith", StringComparison.Ordinal));
+        Assert.DoesNotContain(Directory.EnumerateFiles(site.PictureFolder, "*", SearchOption.AllDirectories), f => f.Contains("smith", StringComparison.Ordinal));
     }
 
     [Fact]
