@@ -25,10 +25,12 @@ public sealed class Demonstration : WebApplicationFactory<Program>, IAsyncLifeti
         browser = await playwright.Chromium.LaunchAsync(new() { ExecutablePath = "/usr/bin/chromium", Args = Flags });
     }
 
+    /// <summary>The same browser before another site.</summary>
+    public async Task<Visitor> Visit(Screen screen, Uri site) => new(await (await browser.NewContextAsync(screen.With(site))).NewPageAsync(), screen);
+
     public async Task<Visitor> Visit(Screen screen, string? name = null)
     {
-        var context = await browser.NewContextAsync(screen.With(ClientOptions.BaseAddress));
-        var visitor = new Visitor(await context.NewPageAsync(), screen);
+        var visitor = await Visit(screen, ClientOptions.BaseAddress);
         if (name is not null) await visitor.SignsIn(name);
         return visitor;
     }
@@ -38,6 +40,7 @@ public sealed class Demonstration : WebApplicationFactory<Program>, IAsyncLifeti
         builder.UseSetting("ConnectionStrings:Credtrack", $"Data Source={Path.Combine(folder.FullName, "credtrack.db")};Pooling=False");
         builder.UseSetting("Pictures:Folder", Path.Combine(folder.FullName, "pictures"));
         builder.UseSetting("Seal:Certificate", Path.Combine(folder.FullName, "seal", "seal.pfx"));
+        builder.UseSetting("Keys:Folder", Path.Combine(folder.FullName, "keys")).UseSetting("Mail:Folder", Path.Combine(folder.FullName, "mail"));
         builder.ConfigureLogging(log => log.ClearProviders());
     }
 

@@ -6,7 +6,7 @@ namespace Credtrack.Browser.Tests.Site;
 /// </summary>
 public sealed record Place(string Name, string? Who, string Shows, Func<Visitor, Task> Reach)
 {
-    private const string Trainee = "Wrenna Ostholm", Drafter = "Maren Eskildsen", Reader = "Dr Halvard Quill", Director = "Dr Seraphine Okwuosa-Lund", Coordinator = "Nuala Fitzmaurice-Hart";
+    private const string Trainee = "Wrenna Ostholm", Drafter = "Maren Eskildsen", Reader = "Dr Halvard Quill", Director = "Dr Seraphine Okwuosa-Lund", Administrator = "Ottilie Brandreth-Moss", Coordinator = "Nuala Fitzmaurice-Hart";
     private const string Attention = "This needs your attention";
 
     private static readonly Place[] All =
@@ -59,6 +59,22 @@ public sealed record Place(string Name, string? Who, string Shows, Func<Visitor,
         new("scan that touches care, to its reader", Reader, "Correct your reading", OwnReading),
         new("correct a reading", Reader, "Why do you correct it?", async v => { await OwnReading(v); await v.Follows("Correct your reading"); }),
         new("correct with errors", Reader, Attention, async v => { await OwnReading(v); await v.Follows("Correct your reading"); await v.Presses("Correct this reading"); }),
+        new("programmes", Administrator, "Found a programme", v => v.Opens("/programmes")),
+        new("found a programme with errors", Administrator, Attention, async v => { await v.Opens("/programmes/new"); await v.Presses("Found it"); }),
+        new("rename a programme", Administrator, "keep the name they were issued with", async v => { await v.Opens("/programmes"); await v.Follows(v.Page.GetByRole(AriaRole.Link, new() { Name = "Rename" }).First); }),
+        new("administrators", Administrator, "They see no scans by it", v => v.Opens("/administrators")),
+        new("appoint an administrator", Administrator, "its name stays", v => v.Opens("/administrators/new")),
+        new("site", Administrator, "What holds for every programme here", v => v.GoesTo("Site")),
+        new("people", Coordinator, "People of Emergency medicine", People),
+        new("invite a person with errors", Coordinator, Attention, async v => { await People(v); await v.Follows("Invite a person"); await v.Presses("Save and invite"); }),
+        new("invite a list, shown first", Coordinator, "What this list will do", async v => { await People(v); await v.Follows("Invite a list"); await v.Types("The list", "Tess, tess@demo.example, trainee, year 1"); await v.Presses("Show what it will do"); }),
+        new("invite a list with faults", Coordinator, Attention, async v => { await People(v); await v.Follows("Invite a list"); await v.Types("The list", "Tess"); await v.Presses("Show what it will do"); }),
+        new("a membership", Coordinator, "Weeks in which nothing is expected", async v => { await People(v); await v.Follows(Trainee); }),
+        new("edit a membership", Coordinator, "opens nothing any more", async v => { await People(v); await v.Follows(Trainee); await v.Follows("Edit"); }),
+        new("note a leave", Coordinator, "No reason is asked for", async v => { await People(v); await v.Follows(Trainee); await v.Follows("Note a leave"); }),
+        new("link for a new password", Coordinator, "whoever is signed in with the old one", async v => { await People(v); await v.Follows(Trainee); await v.Follows("Make a link for a new password"); }),
+        new("your account", Trainee, "Where you are signed in", v => v.Opens("/sessions")),
+        new("change the password with errors", Trainee, Attention, async v => { await v.Opens("/sessions"); await v.Follows("Change your password"); await v.Presses("Change the password"); }),
         new("what does not exist", Trainee, "There is nothing here", v => v.Opens("/scans/none")),
     ];
 
@@ -96,6 +112,12 @@ public sealed record Place(string Name, string? Who, string Shows, Func<Visitor,
     {
         await visitor.Opens("/grants");
         await visitor.Follows(visitor.Page.GetByRole(AriaRole.Link, new() { Name = "Look at the evidence" }).First);
+    }
+
+    private static async Task People(Visitor visitor)
+    {
+        await visitor.GoesTo("People");
+        await visitor.Follows(visitor.Page.GetByRole(AriaRole.Link, new() { Name = "Its people" }).First);
     }
 
     private static async Task Draft(Visitor visitor)
