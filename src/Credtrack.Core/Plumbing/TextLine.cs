@@ -10,9 +10,13 @@ public static class TextLine
     /// <summary>In the bytes that JSON takes for it: the detail of a fact holds the list twice, alone and in its sentence, and letters beyond ASCII take six bytes there.</summary>
     public const int LongestList = 3500;
 
+    // The places that JSON takes for a letter beyond the first 65,536, in a column that is bounded.
+    private const int Emoji = 12;
+
     /// <summary>Why this cannot stand in a line; null if it can. An empty one can.</summary>
     public static string? WhyNot(string text, int longest) =>
           text.Length > longest ? $"Keep it within {longest} characters."
+        : text.Length + text.Count(char.IsHighSurrogate) * (Emoji - 2) > longest ? $"Keep it within {longest} characters; an emoji counts as {Emoji}."
         : text.EnumerateRunes().Any(Breaks) ? "Write it in one line, without control characters."
         : null;
 

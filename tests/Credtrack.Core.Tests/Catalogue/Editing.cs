@@ -19,5 +19,5 @@ internal static class Editing
 
     private static string Code(int n) => $"{new string('a', Codes.Longest - 2)}{n}";
 
-    private static string Long(string letter, int length, string mark = "") => mark + string.Concat(Enumerable.Repeat(letter, (length - mark.Length) / letter.Length));
+    private static string Long(string letter, int length, string mark = "") => mark + string.Concat(Enumerable.Repeat(letter, (length - mark.Length) / (letter.Length == 1 ? 1 : 12)));
 }

@@ -25,6 +25,8 @@ public sealed class TextLineTests
     {
         Assert.Null(TextLine.WhyNot("12345", 5));
         Assert.Equal("Keep it within 5 characters.", TextLine.WhyNot("123456", 5));
+        Assert.Null(TextLine.WhyNot("1🫀2", 14));
+        Assert.Equal("Keep it within 13 characters; an emoji counts as 12.", TextLine.WhyNot("1🫀2", 13));
     }
 
     [Fact]
