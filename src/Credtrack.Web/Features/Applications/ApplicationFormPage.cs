@@ -12,7 +12,7 @@ public sealed record ApplicationFormPage(ApplicationForm Form, Application? Appl
         var catalogue = await db.Applications.AsNoTracking().OrderBy(a => a.Name).ToListAsync();
         var now = form is not null && form.Version != application?.Version ? application : null;
         form ??= ApplicationForm.Of(application!);
-        if (application is not null) (form.Version, form.Code, form.Kind) = (application.Version, application.Code, application.Kind);
+        if (application is not null) (form.Code, form.Kind) = (application.Code, application.Kind);
         return new(form.Spread(), application, catalogue, application is null ? Application.WhyNotAdd(person, catalogue) : application.WhyNotChange(person), now);
     }
 

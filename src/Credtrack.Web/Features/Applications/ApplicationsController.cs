@@ -39,8 +39,13 @@ public sealed class ApplicationsController(CredtrackDb db, Me me, TimeProvider c
     /// <param name="form">what was typed, where a change that lost a race is shown again</param>
     [HttpGet("{id:guid}/edit")]
     [Members(MembershipKind.Coordinator)]
-    public async Task<IActionResult> Edit(Guid id, ApplicationForm form) =>
-        await db.Applications.AsNoTracking().Find(id) is { } application ? View("Edit", await ApplicationFormPage.Load(db, me.Person, HttpMethods.IsPost(Request.Method) ? form : null, application)) : NotFound();
+    public async Task<IActionResult> Edit(Guid id, ApplicationForm form)
+    {
+        if (await db.Applications.AsNoTracking().Find(id) is not { } application) return NotFound();
+        var page = await ApplicationFormPage.Load(db, me.Person, HttpMethods.IsPost(Request.Method) ? form : null, application);
+        page.Form.Version = application.Version; // with the old one a second try would lose as well
+        return View("Edit", page);
+    }
 
     [HttpPost("{id:guid}")]
     [Members(MembershipKind.Coordinator)]
