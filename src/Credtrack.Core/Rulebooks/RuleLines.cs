@@ -26,7 +26,7 @@ public static class RuleLines
         if (application.Privilege is { } privilege) yield return $"{name}: the privilege is “{privilege}”";
         foreach (var asks in application.Require.Select(r => r.Asks).DefaultIfEmpty("a scan that counts")) yield return $"{name}: {asks}";
         yield return $"{name}: a scan counts if it is {application.Counting.Words}";
-        if (application.Introductory > 0) yield return string.Create(CultureInfo.InvariantCulture, $"{name}: the first {application.Introductory} set aside");
+        if (application.Introductory > 0) yield return string.Create(CultureInfo.InvariantCulture, $"{name}: scans set aside first, {application.Introductory}");
         foreach (var cap in application.Caps) yield return string.Create(CultureInfo.InvariantCulture, $"{name}: {cap.Label} (at most {cap.Max} that are {cap.Where.Words})");
     }
 }

@@ -18,7 +18,7 @@ public sealed class RuleLinesTests
     [
         "Called “Harbour”", "Effective 2026-01-01", "Days are those of UTC", "Notes: By heart.", "Source: A book", "Scans of one patient contact all count",
         "Focused cardiac: called “Heart”", "Focused cardiac: the privilege is “Focused heart”", "Focused cardiac: 25 scans", "Focused cardiac: 3 positive scans",
-        "Focused cardiac: a scan counts if it is of image quality 3 or better", "Focused cardiac: the first 2 set aside", "Focused cardiac: two teaching scans (at most 2 that are teaching)",
+        "Focused cardiac: a scan counts if it is of image quality 3 or better", "Focused cardiac: scans set aside first, 2", "Focused cardiac: two teaching scans (at most 2 that are teaching)",
         "lung: a scan that counts", "lung: a scan counts if it is of image quality 3 or better", "Chest (Focused cardiac, lung): 40 scans", "All together: 150 scans in all applications",
     ], Lines(One));
 

@@ -19,8 +19,8 @@ public sealed record ApplicationFormPage(ApplicationForm Form, Application? Appl
     /// <summary>From what was typed to what the noun takes; null, with every fault at its field, if it cannot be.</summary>
     public ApplicationEntry? ToEntry(ModelStateDictionary faults)
     {
-        var entry = new ApplicationEntry(Trimmed(Form.Name), Trimmed(Form.Transducer), Number(Form.DepthFrom, "DepthFrom", 10, faults), Number(Form.DepthTo, "DepthTo", 10, faults),
-            Number(Form.FrequencyFrom, "FrequencyFrom", 1000, faults), Number(Form.FrequencyTo, "FrequencyTo", 1000, faults), Trimmed(Form.Note) is { Length: > 0 } note ? note : null,
+        var entry = new ApplicationEntry(Trimmed(Form.Name), Trimmed(Form.Transducer), Number(Form.DepthFrom, "DepthFrom", 10, "depth in cm", faults), Number(Form.DepthTo, "DepthTo", 10, "depth in cm", faults),
+            Number(Form.FrequencyFrom, "FrequencyFrom", 1000, "frequency in MHz", faults), Number(Form.FrequencyTo, "FrequencyTo", 1000, "frequency in MHz", faults), Trimmed(Form.Note) is { Length: > 0 } note ? note : null,
             Views(), Questions(), [.. Form.Parts.Where(p => !string.IsNullOrWhiteSpace(p)).Select(p => p!.Trim())]);
         if (Application is null && Application.WhyNotCode(Trimmed(Form.Code), Catalogue) is { } code) faults.AddModelError("Form.Code", code);
         foreach (var (about, why) in entry.Faults(Form.Kind, Catalogue.Where(a => a.Id != Application?.Id)))
@@ -48,10 +48,10 @@ public sealed record ApplicationFormPage(ApplicationForm Form, Application? Appl
         return taken[^1];
     }
 
-    private static int Number(string? typed, string field, int scale, ModelStateDictionary faults)
+    private static int Number(string? typed, string field, int scale, string what, ModelStateDictionary faults)
     {
         if (typed?.Scaled(scale) is { } number) return number;
-        faults.AddModelError($"Form.{field}", "Enter a number such as 3 or 15.5.");
+        faults.AddModelError($"Form.{field}", $"Give the {what}, a number such as 3 or 12.5.");
         return 0;
     }
 

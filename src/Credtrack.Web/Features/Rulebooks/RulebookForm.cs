@@ -26,7 +26,6 @@ public sealed class RulebookForm
 
     public string? Template { get; set; }
 
-    [Display(Name = "Choose a JSON file")]
     public IFormFile? File { get; set; }
 
     [Display(Name = "Rulebook as JSON")]

@@ -73,16 +73,16 @@ public sealed class ApplicationsTests(RunningSite site) : IClassFixture<RunningS
         Assert.Equal(HttpStatusCode.UnprocessableEntity, coordinator.Status);
         Assert.Equal(Sorted(
             "Write the code in small letters, digits and single hyphens, such as arrest-echo, within 40 characters.", "Give the application a name.", "Name the usual transducer, such as: curved or linear.",
-            "Enter a number such as 3 or 15.5.", "Enter a number such as 3 or 15.5.", "Enter a number such as 3 or 15.5.", "Enter a number such as 3 or 15.5.",
+            "Give the depth in cm, a number such as 3 or 12.5.", "Give the depth in cm, a number such as 3 or 12.5.", "Give the frequency in MHz, a number such as 3 or 12.5.", "Give the frequency in MHz, a number such as 3 or 12.5.",
             "Name at least one view that is required, or a group of which one suffices.", "Ask at least one question that has a positive answer: it gives a scan its result."), coordinator.Faults().Order());
 
         await coordinator.FillsDiaphragm("lung").Fills("Name", "LUNG").Fills("Depth from cm", "deep").Fills("Frequency to MHz", "5").Fills("View 1", "").Fills("View 2", "Dome").Fills("Need of view 2", "OneOf")
             .Fills("Question 2", "thickening NORMAL?").Fills("Part 1", "Left side").Presses(Cataloguing.Add);
         Assert.Equal(Sorted(
-            "Another application has this code; a retired one keeps its own too.", "Another application of the catalogue bears this name; choose another one.", "Enter a number such as 3 or 15.5.", "Give a frequency greater than the one it starts from.",
+            "Another application has this code; a retired one keeps its own too.", "Another application of the catalogue bears this name; choose another one.", "Give the depth in cm, a number such as 3 or 12.5.", "Give a frequency greater than the one it starts from.",
             "Name the group of which one view suffices, such as heart.", "This question is already there; ask each one once.", "Write the part in small letters, digits and single hyphens, such as long-bone, within 40 characters."), coordinator.Faults().Order());
         // The emptied row is gone, the one after it has moved up with all that was typed into it.
-        Assert.Equal(("Dome", "OneOf", "deep", "No", "Left side"), (coordinator.Typed("View 1"), coordinator.Typed("Need of view 1"), coordinator.Typed("Depth from cm"), coordinator.Typed("Positive answer of question 1"), coordinator.Typed("Part 1")));
+        Assert.Equal(("Dome", "OneOf", "deep", "No", "Left side"), (coordinator.Typed("View 1"), coordinator.Typed("Need of view 1"), coordinator.Typed("Depth from cm"), coordinator.Typed("Positive answer 1"), coordinator.Typed("Part 1")));
     }
 
     [Fact]

@@ -16,7 +16,7 @@ public sealed class AskedTests(RunningSite site) : IClassFixture<RunningSite>
         var world = await site.NewWorld();
         var scan = await world.Waiting(world.Entry("lung") with { Answers = site.Applications["lung"].Questions.ToDictionary(q => q.Code, q => q.Code == "sliding" ? Answer.Yes : Answer.No) });
         using var coordinator = await world.Edits("lung");
-        await coordinator.Fills("Question 1", Now).Fills("Positive answer of question 1", "Yes").Fills("Question 4", "").Fills("View 1", "Right, front").Presses(Cataloguing.Keep);
+        await coordinator.Fills("Question 1", Now).Fills("Positive answer 1", "Yes").Fills("Question 4", "").Fills("View 1", "Right, front").Presses(Cataloguing.Keep);
         Assert.Equal(HttpStatusCode.OK, coordinator.Status);
 
         using var trainee = await (await world.As(world.Trainee)).Opens($"/scans/{scan.Id}");

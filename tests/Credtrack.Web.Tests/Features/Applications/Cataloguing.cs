@@ -41,5 +41,5 @@ internal static class Cataloguing
     public static Visitor FillsDiaphragm(this Visitor coordinator, string code) => coordinator
         .Fills("Code", code).Fills("Name", $"Diaphragm {code}").Fills("Usual transducer", "linear")
         .Fills("Depth from cm", "2").Fills("Depth to cm", "8,5").Fills("Frequency from MHz", "5").Fills("Frequency to MHz", "12.5")
-        .Fills("View 1", "Zone of apposition").Fills("Question 1", "Thickening normal?").Fills("Positive answer of question 1", "No");
+        .Fills("View 1", "Zone of apposition").Fills("Question 1", "Thickening normal?").Fills("Positive answer 1", "No");
 }

@@ -11,7 +11,7 @@ public sealed class EditTests(RunningSite site) : IClassFixture<RunningSite>
         var world = await site.NewWorld();
         using var coordinator = await world.Edits("aorta");
         await coordinator.Fills("View 1", "Transverse, top").Fills("View 2", "").Fills("View 5", "Lengthwise").Fills("Need of view 5", "Required").Fills("View 6", "Transverse, middle").Fills("Need of view 6", "Optional")
-            .Fills("Question 1", "Outer diameter 4 cm or more?").Fills("Question 2", "").Fills("Question 3", "Dissection flap?").Fills("Positive answer of question 3", "Yes")
+            .Fills("Question 1", "Outer diameter 4 cm or more?").Fills("Question 2", "").Fills("Question 3", "Dissection flap?").Fills("Positive answer 3", "Yes")
             .Fills("Note", "").Fills("Depth to cm", "18").Fills("Part 1", "proximal").Presses(Cataloguing.Keep);
         Assert.Contains("Changes kept", coordinator.Text, StringComparison.Ordinal);
         Assert.Contains("changed the application: depth in mm from 80 to 160, now 80 to 180; another note; view “Transverse, middle” removed; view “Transverse, proximal” now “Transverse, top”, required; view “Long axis” now “Lengthwise”, required; "
@@ -29,7 +29,7 @@ public sealed class EditTests(RunningSite site) : IClassFixture<RunningSite>
         var world = await site.NewWorld();
         using var coordinator = await world.Edits("bowel");
         var first = site.Applications["bowel"].Questions[0];
-        await coordinator.Fills("Question 1", "").Fills($"Question {site.Applications["bowel"].Questions.Count + 1}", first.Code).Fills($"Positive answer of question {site.Applications["bowel"].Questions.Count + 1}", "Yes").Presses(Cataloguing.Keep);
+        await coordinator.Fills("Question 1", "").Fills($"Question {site.Applications["bowel"].Questions.Count + 1}", first.Code).Fills($"Positive answer {site.Applications["bowel"].Questions.Count + 1}", "Yes").Presses(Cataloguing.Keep);
         Assert.Equal($"{first.Code}-2", (await site.Listed("bowel")).Questions[^1].Code);
     }
 

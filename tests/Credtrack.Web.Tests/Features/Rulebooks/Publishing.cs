@@ -3,7 +3,7 @@ namespace Credtrack.Web.Tests.Features.Rulebooks;
 /// <summary>How a director or coordinator goes about the next version.</summary>
 internal static class Publishing
 {
-    public const string Text = "Rulebook as JSON", Look = "Look at what it says", File = "Choose a JSON file";
+    public const string Text = "Rulebook as JSON", Look = "Look at what it says", File = "JSON file";
 
     public static readonly string Stricter = World.TestRules.Replace("\"min\": 3 }]", "\"min\": 5 }]", StringComparison.Ordinal);
 
