@@ -1,3 +1,4 @@
+using System.Text.Encodings.Web;
 using System.Text.Json;
 using System.Text.Json.Serialization;
 using Credtrack.Core.Catalogue;
@@ -13,8 +14,10 @@ internal static class ListColumn
 
     private const int Longest = 8000;
 
+    // Letters of any script take one place each, so that a list of a given length fits whatever it is written in. The column is never read as HTML.
     private static readonly JsonSerializerOptions Compact = new()
     {
+        Encoder = JavaScriptEncoder.UnsafeRelaxedJsonEscaping,
         DefaultIgnoreCondition = JsonIgnoreCondition.WhenWritingNull,
         Converters = { new JsonStringEnumConverter() },
     };

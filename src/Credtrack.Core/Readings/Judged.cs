@@ -22,17 +22,17 @@ public sealed record Judged(
     /// <summary>What the ledger says of a correction; empty if nothing is another. Free text is named, never quoted.</summary>
     public string ChangesTo(Judged now) => Scan.Difference(Described, now.Described);
 
-    private List<(string Name, string Value)> Described =>
+    private List<(string Kind, string Name, string Value)> Described =>
     [
-        ("image quality", Quality is { } q ? string.Create(CultureInfo.InvariantCulture, $"{q} of 5") : "not scored"),
-        ("result", Result?.ToString() ?? "none"),
-        ("application", ApplicationId.ToString()),
-        ("part", Subtype ?? "none"),
-        ("clinically indicated", Scan.Said(Indicated)),
-        ("hands-on help", Scan.Said(Assisted)),
-        ("supervision at most", AtMost.ToString()),
-        ("feedback", Feedback ?? ""),
-        .. Views.Select(v => ($"view {v.Name}", v.Marked ? "adequate" : "not adequate")),
-        .. Answers.Select(a => (a.Text.TrimEnd('?'), a.Given?.ToString() ?? "open")),
+        (Scan.Own, "image quality", Quality is { } q ? string.Create(CultureInfo.InvariantCulture, $"{q} of 5") : "not scored"),
+        (Scan.Own, "result", Result?.ToString() ?? "none"),
+        (Scan.Own, "application", ApplicationId.ToString()),
+        (Scan.Own, "part", Subtype ?? "none"),
+        (Scan.Own, "clinically indicated", Scan.Said(Indicated)),
+        (Scan.Own, "hands-on help", Scan.Said(Assisted)),
+        (Scan.Own, "supervision at most", AtMost.ToString()),
+        (Scan.Own, "feedback", Feedback ?? ""),
+        .. Views.Select(v => ("view", $"view {v.Name}", v.Marked ? "adequate" : "not adequate")),
+        .. Answers.Select(a => ("question", a.Text.TrimEnd('?'), a.Given?.ToString() ?? "open")),
     ];
 }

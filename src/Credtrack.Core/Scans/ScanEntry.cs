@@ -15,11 +15,13 @@ public sealed record ScanEntry(
     public const int EarliestYear = 1950;
 
     /// <summary>What cannot be so, each with the name of the value it is about.</summary>
-    public IEnumerable<(string About, string Why)> Faults(Guid traineeId, Guid programmeId, DateTime now)
+    /// <param name="changed">the scan that this changes, if it is no new one: what it has already, it keeps</param>
+    public IEnumerable<(string About, string Why)> Faults(Guid traineeId, Guid programmeId, DateTime now, Scan? changed = null)
     {
+        if (Application.IsRetired && changed?.Has(Application) != true) yield return (nameof(Application), $"{Application.Name} is retired; choose another application.");
         if (PerformedAt > now) yield return (nameof(PerformedAt), "This time has not come yet. Enter when the scan was performed.");
         if (PerformedAt.Year < EarliestYear) yield return (nameof(PerformedAt), "This is too long ago. Check the year.");
-        if (Subtype is not null && !Application.Subtypes.Contains(Subtype)) yield return (nameof(Subtype), $"Choose a part that belongs to {Application.Name}, or none.");
+        if (Subtype is not null && !(changed?.PartsUnder(Application) ?? Application.Subtypes).Contains(Subtype)) yield return (nameof(Subtype), $"Choose a part that belongs to {Application.Name}, or none.");
         if (Supervision == Supervision.Direct && Supervisor is null) yield return (nameof(Supervisor), "Name the person who supervised at the bedside.");
         if (Supervisor?.Id == traineeId) yield return (nameof(Supervisor), "Nobody supervises themselves.");
         else if (Supervisor is not null && !Supervisor.Is(MembershipKind.Reader, programmeId)) yield return (nameof(Supervisor), "Choose a reader of this programme.");

@@ -33,6 +33,17 @@ public sealed record Place(string Name, string? Who, string Shows, Func<Visitor,
         new("standings", Director, "What each trainee has", v => v.Opens("/standings")),
         new("standing of a trainee", Director, "Nearest gaps", async v => { await v.Opens("/standings"); await v.Follows(Trainee); }),
         new("rulebook", Trainee, "Which scans count", async v => { await v.Opens("/standings"); await v.Follows("“Brindlemoor emergency”, version 4"); }),
+        new("rulebooks", Director, "A published version stays", v => v.Opens("/rulebooks")),
+        new("next rulebook", Coordinator, "Where it comes from", NextRulebook),
+        new("next rulebook with errors", Coordinator, Attention, async v => { await NextRulebook(v); await v.Presses("Look at what it says"); }),
+        new("next rulebook in words", Coordinator, "No longer there", async v => { await NextRulebook(v); await v.Page.GetByLabel("Template").SelectOptionAsync("acep-2016"); await v.Presses("Take the template"); }),
+        new("catalogue", Trainee, "What can be scanned here", v => v.Opens("/applications")),
+        new("catalogue of a coordinator", Coordinator, "Add a procedure", v => v.Opens("/applications")),
+        new("application", Trainee, "Usual values are hints", async v => { await v.Opens("/applications"); await v.Follows("Lung"); }),
+        new("application of a coordinator", Coordinator, "Retire it", async v => { await v.Opens("/applications"); await v.Follows("Lung"); }),
+        new("new application with errors", Coordinator, Attention, async v => { await v.Opens("/applications/new"); await v.Presses("Add it to the catalogue"); }),
+        new("new procedure", Coordinator, "whether its target was reached", v => v.Opens("/applications/new?kind=Procedure")),
+        new("edit an application", Coordinator, "Add another question", async v => { await v.Opens("/applications"); await v.Follows("Extended trauma (eFAST)"); await v.Follows("Change it"); }),
         new("desk", Director, "Signed and standing", v => v.Opens("/grants")),
         new("grants of a trainee", Trainee, "Signed and standing", v => v.Opens("/grants")),
         new("evidence and signature", Director, "What exactly you sign", Evidence),
@@ -118,6 +129,12 @@ public sealed record Place(string Name, string? Who, string Shows, Func<Visitor,
     {
         await visitor.GoesTo("People");
         await visitor.Follows(visitor.Page.GetByRole(AriaRole.Link, new() { Name = "Its people" }).First);
+    }
+
+    private static async Task NextRulebook(Visitor visitor)
+    {
+        await visitor.Opens("/rulebooks");
+        await visitor.Follows("Write the next version");
     }
 
     private static async Task Draft(Visitor visitor)

@@ -39,5 +39,33 @@ public sealed class RulebookTests
             (rulebook.ProgrammeId, rulebook.Name, rulebook.Edition, rulebook.Text, rulebook.PublishedAt));
     }
 
+    [Fact]
+    public void The_next_edition_follows_the_one_in_force()
+    {
+        var third = Publish(cast.Director);
+        Assert.Null(Rulebook.WhyNotPublishNext(cast.Director, cast.Programme, null, 1));
+        Assert.Equal(4, Rulebook.PublishNext(cast.Director, cast.Programme, third, 4, "Harbour rules", third.Text, Cast.Noon).Edition);
+        foreach (var edition in new[] { 3, 5 })
+        {
+            Refused.With($"Version {edition} cannot be published: version 3 is in force by now. Look at what differs from it.", Rulebook.WhyNotPublishNext(cast.Director, cast.Programme, third, edition),
+                () => Rulebook.PublishNext(cast.Director, cast.Programme, third, edition, "Harbour rules", third.Text, Cast.Noon));
+        }
+        Refused.With(Why, Rulebook.WhyNotPublishNext(cast.Trainee, cast.Programme, third, 4), () => Rulebook.PublishNext(cast.Trainee, cast.Programme, third, 4, "Harbour rules", third.Text, Cast.Noon));
+    }
+
+    [Theory]
+    [InlineData("\"name\": \"two\\nlines\",", "$.name: expected one line of at most 200 characters, without control characters")]
+    [InlineData("\"name\": \"\",", "$.name: expected a text that is not empty")]
+    public void An_edition_has_a_name_of_one_line(string name, string fault) =>
+        Assert.Equal(fault, Assert.Single(Rulebook.Read(Book.Json("\"applications\": []").Replace("\"name\": \"Harbour\",", name, StringComparison.Ordinal), "UTC").Faults).ToString());
+
+    [Fact]
+    public void A_text_that_is_too_long_is_not_even_read()
+    {
+        var read = Rulebook.Read(new string('[', Rulebook.LongestText + 1), "UTC");
+        Assert.Equal("$: expected at most 200,000 characters, found 200,001", Assert.Single(read.Faults).ToString());
+        Assert.Null(read.Rules);
+    }
+
     private Rulebook Publish(Person by) => Rulebook.Publish(by, cast.Programme, "Harbour rules", 3, Book.Json("\"applications\": []"), Cast.Noon);
 }

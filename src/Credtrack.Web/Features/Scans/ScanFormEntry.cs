@@ -1,4 +1,4 @@
-using System.Globalization;
+using Credtrack.Core;
 using Credtrack.Core.Measures;
 using Credtrack.Core.Scans;
 using Microsoft.AspNetCore.Mvc.ModelBinding;
@@ -13,18 +13,19 @@ public static class ScanFormEntry
         if (page.AsksForProgramme && page.Programmes.All(m => m.ProgrammeId != form.ProgrammeId)) faults.AddModelError("Form.ProgrammeId", "Choose the programme in which the scan is logged.");
         if (page.Chosen is not { } application)
         {
-            faults.AddModelError("Form.Application", "Choose the application you scanned.");
+            faults.AddModelError("Form.Application", string.IsNullOrEmpty(form.Application) ? "Choose the application you scanned." : "This application is not offered any more. Choose another one.");
             return null;
         }
+        RuleBroken.If(page.IsAskedAsShown(application) ? null : $"What is asked of {application.Name} has just been changed in the catalogue. Look at its views and questions again; what you typed is kept.");
         var settings = new MachineSettings(form.Transducer,
             Number(form.Depth, "Depth", 10, "15 or 15.5", faults), Number(form.Frequency, "Frequency", 1000, "3.5", faults),
             Number(form.MechanicalIndex, "MechanicalIndex", 100, "0.9", faults), Number(form.ThermalIndex, "ThermalIndex", 100, "0.4", faults));
         var supervisor = page.Readers.SingleOrDefault(r => r.Id == form.Supervisor);
         if (form.Supervisor is not null && supervisor is null) faults.AddModelError("Form.Supervisor", "Choose a reader of this programme.");
         // A part left over from another application is no fault where there is none to choose.
-        var entry = new ScanEntry(application, application.Subtypes.Count == 0 ? null : Trimmed(form.Subtype), PerformedAt(form, page.Scan, faults, zone, now), form.Role, form.Setting, form.Indicated,
+        var entry = new ScanEntry(application, (page.Scan?.PartsUnder(application) ?? application.Subtypes).Count == 0 ? null : Trimmed(form.Subtype), PerformedAt(form, page.Scan, faults, zone, now), form.Role, form.Setting, form.Indicated,
             supervisor is null ? Supervision.Later : Supervision.Direct, supervisor, form.Assisted, settings, Trimmed(form.Note), form.Views, form.Answers);
-        foreach (var (about, why) in entry.Faults(traineeId, page.ProgrammeId, now)) faults.AddModelError($"Form.{FieldOf(about)}", why);
+        foreach (var (about, why) in entry.Faults(traineeId, page.ProgrammeId, now, page.Scan)) faults.AddModelError($"Form.{FieldOf(about)}", why);
         foreach (var (about, why) in Missing(form, page, entry)) faults.AddModelError($"Form.{about}", why);
         return faults.IsValid ? entry : null;
     }
@@ -59,12 +60,10 @@ public static class ScanFormEntry
         return Scan.Missing(answers, page.PicturesAfter, entry.Supervision == Supervision.Direct);
     }
 
-    /// <summary>The value in whole units of 1/scale; up to three digits of a decimal, with a point or a comma.</summary>
     private static int? Number(string? typed, string field, int scale, string example, ModelStateDictionary faults)
     {
         if (string.IsNullOrWhiteSpace(typed)) return null;
-        if (decimal.TryParse(typed.Trim().Replace(',', '.'), NumberStyles.AllowDecimalPoint, CultureInfo.InvariantCulture, out var number) && number < 100_000)
-            return (int)Math.Round(number * scale);
+        if (typed.Scaled(scale) is { } number) return number;
         faults.AddModelError($"Form.{field}", $"Enter a number such as {example}, or leave this empty.");
         return null;
     }

@@ -12,7 +12,7 @@ namespace Credtrack.Web.Features.Scans;
 public sealed record ApplicationTile(Application Application, Depth? Depth, string Missing);
 
 /// <summary>The views and questions of one application, as the form asks them.</summary>
-public sealed record AskedOf(Application Application, IReadOnlyList<View> Views, IReadOnlyList<Question> Questions, bool IsChosen);
+public sealed record AskedOf(Application Application, IReadOnlyList<View> Views, IReadOnlyList<Question> Questions, IReadOnlyList<string> Parts, bool IsChosen);
 
 public sealed record ScanFormPage(
     ScanForm Form, Guid ProgrammeId, IReadOnlyList<Membership> Programmes, IReadOnlyList<Application> Applications, IReadOnlyList<ApplicationTile> Tiles,
@@ -23,20 +23,26 @@ public sealed record ScanFormPage(
     /// <summary>The scan as it is, beside what was typed, after somebody else was faster.</summary>
     public ScanPage? Now { get; set; }
     public int PicturesAfter => Kept.Count + (Scan?.ShownPictures.Count(p => !Form.Remove.Contains(p.Id)) ?? 0);
+
+    /// <summary>Whether the catalogue still asks what the form showed. What a scan was asked already, it keeps.</summary>
+    public bool IsAskedAsShown(Application application) =>
+        Scan?.ApplicationId == application.Id || !Form.Catalogue.TryGetValue(application.Code, out var shown) || shown == application.Version;
+
     public bool AsksForProgramme => Scan is null && Programmes.Count > 1;
     public Application? Chosen => Applications.SingleOrDefault(a => a.Code == Form.Application);
 
     /// <summary>A scan that is being edited keeps the views and questions it was asked.</summary>
     public IEnumerable<AskedOf> Asked => Applications.Select(a => Scan?.ApplicationId == a.Id
-        ? new AskedOf(a, [.. Scan.ViewsUnder(a)], [.. Scan.QuestionsUnder(a)], a == Chosen)
-        : new AskedOf(a, a.Views, a.Questions, a == Chosen));
+        ? new AskedOf(a, [.. Scan.ViewsUnder(a)], [.. Scan.QuestionsUnder(a)], Scan.PartsUnder(a), a == Chosen)
+        : new AskedOf(a, a.Views, a.Questions, a.Subtypes, a == Chosen));
 
     public static async Task<ScanFormPage> Load(CredtrackDb db, Me me, ScanForm form, Scan? scan, TimeProvider clock)
     {
         var programmes = me.Person.Memberships.Where(m => m.Kind == MembershipKind.Trainee).DistinctBy(m => m.ProgrammeId).OrderBy(m => m.Programme.Name).ToList();
         var programmeId = scan?.ProgrammeId ?? programmes.Find(m => m.ProgrammeId == form.ProgrammeId)?.ProgrammeId ?? programmes[0].ProgrammeId;
         var (now, today) = (clock.UtcNow(), me.Today(clock));
-        var applications = await db.Applications.AsNoTracking().OrderBy(a => a.Name).ToListAsync();
+        var kept = scan?.ApplicationId;
+        var applications = await db.Applications.AsNoTracking().Where(a => a.RetiredAt == null || a.Id == kept).OrderBy(a => a.Name).ToListAsync();
         var readers = await db.People.AsNoTracking().Include(p => p.Memberships.Where(m => m.FirstDay <= today && (m.LastDay == null || m.LastDay >= today)))
             .Where(p => p.Id != me.Person.Id && p.Memberships.Any(m => m.Kind == MembershipKind.Reader && m.ProgrammeId == programmeId && m.FirstDay <= today && (m.LastDay == null || m.LastDay >= today)))
             .OrderBy(p => p.Name).ToListAsync();
@@ -49,7 +55,7 @@ public sealed record ScanFormPage(
     private static List<ApplicationTile> Recent(List<Application> applications, List<ScanEvidence> evidence, Rules? rules, DateOnly today, string? chosen)
     {
         var standing = rules is null ? null : Standing.Of(rules, evidence, [], today);
-        var codes = evidence.OrderByDescending(e => e.PerformedAt).Select(e => e.Application).Concat(rules?.Applications.Select(a => a.Code) ?? []).Concat(applications.Select(a => a.Code)).Distinct().Take(4).ToList();
+        var codes = evidence.OrderByDescending(e => e.PerformedAt).Select(e => e.Application).Concat(rules?.Applications.Select(a => a.Code) ?? []).Concat(applications.Select(a => a.Code)).Distinct().Where(code => applications.Exists(a => a.Code == code)).Take(4).ToList();
         if (chosen is not null && !codes.Contains(chosen)) codes = [chosen, .. codes.Take(3)];
         return [.. from code in codes
                    join application in applications on code equals application.Code
