@@ -1,3 +1,4 @@
+using Credtrack.Core.Catalogue;
 using Credtrack.Core.Grants;
 using Credtrack.Web.Features.Documents.Seals;
 using Microsoft.Extensions.DependencyInjection;
@@ -29,13 +30,39 @@ public sealed class SignaturesTests(RunningSite site) : IClassFixture<RunningSit
     [Fact]
     public async Task Every_value_opens_into_as_many_scans()
     {
-        var world = await site.NewWorld();
-        for (var n = 0; n < 2; n++) await world.Read();
+        var world = await World.Build(site, Conditions);
+        foreach (var answer in new[] { Answer.Yes, Answer.No, Answer.No }) await world.Read(4, answer);
         await world.Read(2);
+        await world.Waiting();
+        await world.Read(4, Answer.Yes, "lung");
         using var director = await world.AtTheDesk(world.Director, await world.Proposed());
-        var links = director.Page.QuerySelectorAll("tbody td a").Select(a => (Number: a.TextContent, Url: a.GetAttribute("href")!)).ToList();
-        Assert.Equal(["2", "3", "2"], links.Select(l => l.Number));
-        foreach (var (number, url) in links) Assert.Equal(number, $"{(await director.Opens(url)).Page.QuerySelectorAll(".scans li").Length}");
+        var links = director.Page.QuerySelectorAll("tbody td a").Select(a => (Value: a.TextContent, Url: a.GetAttribute("href")!)).ToList();
+        // Of the application 3 scans, 1 of them positive, which is 33 % of 3; of the group 4; all together 2 positive ones; then performed, read, that count.
+        (string Value, int Scans)[] expected = [("3", 3), ("1", 1), ("33.33 %", 1), ("3", 3), ("4", 4), ("2", 2), ("5", 5), ("4", 4), ("3", 3)];
+        Assert.Equal(expected.Select(e => e.Value), links.Select(l => l.Value));
+        foreach (var ((_, scans), (_, url)) in expected.Zip(links))
+        {
+            await director.Opens(url);
+            Assert.Equal(scans, director.Page.QuerySelectorAll(".scans li").Length);
+            Assert.Contains($"Every number above opens into these. {scans} scan", director.Text, StringComparison.Ordinal);
+        }
+    }
+
+    [Fact]
+    public async Task Behind_a_value_above_fifty_all_scans_are_found_page_by_page_and_no_other()
+    {
+        var world = await World.Build(site, Conditions);
+        for (var n = 0; n < 53; n++) await world.Read(4, Answer.Yes);
+        await world.Read(4, Answer.No);
+        using var director = await world.AtTheDesk(world.Director, await world.Proposed());
+        await director.Opens(director.Page.QuerySelectorAll("tbody td a").First(a => a.TextContent == "53").GetAttribute("href")!);
+        Assert.Contains("53 scans, 50 a page.", director.Text, StringComparison.Ordinal);
+        var found = director.Page.QuerySelectorAll(".scans a").Select(a => a.GetAttribute("href")).ToList();
+        await director.Opens(director.Page.QuerySelectorAll("a").Single(a => a.TextContent == "Older ones").GetAttribute("href")!);
+        found.AddRange(director.Page.QuerySelectorAll(".scans a").Select(a => a.GetAttribute("href")));
+        Assert.Equal((53, 53), (found.Count, found.Distinct().Count()));
+        Assert.Contains("Newer ones", director.Text, StringComparison.Ordinal);
+        Assert.DoesNotContain("Older ones", director.Text, StringComparison.Ordinal);
     }
 
     [Fact]
@@ -117,6 +144,18 @@ public sealed class SignaturesTests(RunningSite site) : IClassFixture<RunningSit
         var refused = await Assert.ThrowsAnyAsync<Exception>(() => site.Ask(db => db.Database.ExecuteSqlRawAsync(sql, id)));
         Assert.Contains(why, refused.Message, StringComparison.Ordinal);
     }
+
+    private const string Conditions = """
+        {
+          "format": "credtrack-rulebook/1", "name": "Conditions", "version": 1, "effective": "2026-01-01", "timeZone": "Europe/Dublin", "counting": { "quality": { "min": 3 } },
+          "applications": [
+            { "code": "cardiac", "require": [{ "kind": "count", "min": 1 }, { "kind": "count", "min": 1, "where": { "positive": true } }, { "kind": "share", "where": { "positive": true }, "min": 0.5 }] },
+            { "code": "lung", "require": [] }
+          ],
+          "groups": [{ "name": "chest", "applications": ["cardiac", "lung"], "require": [{ "kind": "count", "min": 9 }] }],
+          "overall": [{ "kind": "count", "min": 1, "where": { "positive": true } }]
+        }
+        """;
 
     // A context each, loaded before either has saved as often as the machine will have it; whoever is later meets the version or the key.
     private Task<bool> Sign(World world, Guid id, Person by) => Task.Run(() => site.Ask(async db =>
