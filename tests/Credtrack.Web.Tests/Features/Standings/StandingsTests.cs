@@ -61,7 +61,7 @@ public sealed class StandingsTests(RunningSite site) : IClassFixture<RunningSite
         var standing = Standing.Of(RulesReader.Read(Conditions, "UTC").Rules!, evidence, [], new DateOnly(2026, 3, 1));
         using var trainee = await world.As(world.Trainee);
         await trainee.Opens($"/standings/{world.Trainee.Id}");
-        var rows = trainee.Page.QuerySelectorAll("table tbody tr").Select(r => r.Children.Select(c => c.TextContent.Trim()).ToList()).ToList();
+        var rows = trainee.Page.QuerySelectorAll("table tbody tr").Select(r => r.Children.Select(c => string.Join(' ', c.TextContent.Split((char[]?)null, StringSplitOptions.RemoveEmptyEntries))).ToList()).ToList();
         foreach (var (application, row) in standing.Applications.Zip(rows))
             Assert.Equal([$"{application.Counted}", $"{application.Pending}", $"{application.Excluded.Values.Sum()}"], row[2..5]);
         Assert.Equal(["All together", "1", "0"], rows[2][..3]);
