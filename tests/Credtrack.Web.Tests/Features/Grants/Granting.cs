@@ -22,14 +22,19 @@ internal static class Granting
     public static async Task<(Guid Grant, Document Document)> Signed(this World world)
     {
         var id = await world.Proposed();
+        return (id, await world.Sign(id, world.Director));
+    }
+
+    public static async Task<Document> Sign(this World world, Guid id, Person by)
+    {
         await using var scope = world.Site.Services.CreateAsyncScope();
         var (db, issuing) = (scope.ServiceProvider.GetRequiredService<CredtrackDb>(), scope.ServiceProvider.GetRequiredService<Issuing>());
         var (grant, site) = (await db.Grants.SingleAsync(g => g.Id == id), await db.Sites.SingleAsync());
         var statement = (await GrantEvidence.Load(db, site, grant, DateOnly.FromDateTime(world.Now))).Statement;
-        grant.Sign(world.Director, statement, Meaning.Granted, "Trained elsewhere before.", world.Now);
-        issuing.Issue(grant, statement, world.Director, site);
+        grant.Sign(by, statement, Meaning.Granted, "Trained elsewhere before.", world.Now);
+        issuing.Issue(grant, statement, by, site);
         await db.SaveChangesAsync();
-        return (id, grant.Documents[0]);
+        return grant.Documents[0];
     }
 
     public static Task<int> End(this World world, Guid id) => world.Site.Ask(async db =>
