@@ -38,7 +38,7 @@ public sealed class AlteredFileTests(RunningSite site) : IClassFixture<RunningSi
 
     private Task<List<CheckAnswer>> Answers(IReadOnlyList<byte[]> files) => site.Ask(async db =>
     {
-        var (answers, trust) = (new List<CheckAnswer>(), site.Services.GetRequiredService<SealingCertificate>());
+        var (answers, trust) = (new List<CheckAnswer>(), site.Services.GetRequiredService<SealTrust>());
         foreach (var file in files) answers.Add(await CheckAnswer.OfFile(db, file, trust));
         return answers;
     });
