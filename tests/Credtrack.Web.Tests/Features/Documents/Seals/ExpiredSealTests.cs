@@ -18,6 +18,7 @@ public sealed class ExpiredSealSite : RunningSite
         var path = SealPress.NewPath();
         SealPress.Open(path).Dispose();
         builder.UseSetting("Seal:Certificate", path);
+        builder.UseSetting("Pictures:Folder", Path.Combine(BlankSite.Folder, $"pictures-{Guid.NewGuid():N}")); // six years on, those of the other sites would be erased as abandoned
         Clock.Now = Clock.Now.AddYears(6);
     }
 }
