@@ -4,6 +4,7 @@ namespace Credtrack.Browser.Tests;
 public sealed class FirstStartJourneyTests(Demonstration browser)
 {
     private const string Password = "three green herons wade";
+    private static readonly string[] Listed = ["tom@tests.example", "rita@tests.example", "dora@tests.example"];
 
     [Fact]
     public async Task An_empty_installation_becomes_a_programme_at_work()
@@ -60,7 +61,7 @@ public sealed class FirstStartJourneyTests(Demonstration browser)
         await cora.Presses("Show what it will do");
         await cora.Presses("Admit 3 lines now");
         var links = await cora.Page.Locator("code.key").AllInnerTextsAsync();
-        return [.. new[] { "tom@tests.example", "rita@tests.example", "dora@tests.example" }.Zip(links, (address, link) => (address, site.Here(link)))];
+        return [.. Listed.Zip(links, (address, link) => (address, site.Here(link)))];
     }
 
     private async Task Published(Opening site)

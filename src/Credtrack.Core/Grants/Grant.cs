@@ -23,6 +23,9 @@ public sealed partial class Grant : Recorded
     public DateTime ProposedAt { get; private init; }
     public Decline? Decline { get; private set; }
     public Ending? Ending { get; private set; }
+
+    /// <summary>True while it is proposed or stands, else null: of those the database lets in one alone for a holder, application and programme.</summary>
+    public bool? IsOpen { get; private set; }
     public IReadOnlyList<Signature> Signatures => signatures;
     public IReadOnlyList<Document> Documents => documents;
 
@@ -63,6 +66,7 @@ public sealed partial class Grant : Recorded
             Privilege = privilege,
             ProposedById = by.Id,
             ProposedAt = at,
+            IsOpen = true,
         };
         grant.Record(new GrantProposed(by, at, holder.Name, privilege));
         return grant;

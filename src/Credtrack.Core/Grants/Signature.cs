@@ -21,6 +21,8 @@ public sealed class Signature
     public DateTime At { get; private init; }
     public Meaning Meaning { get; private init; }
     public string? GapReason { get; private init; }
+    public string? GapSalt { get; private init; }
+    public SealedText? Gap => GapReason is null ? null : new(GapReason, GapSalt ?? "");
 
     /// <summary>The text that was on the screen, and its SHA-256.</summary>
     public string Text { get; private init; } = "";
@@ -28,10 +30,10 @@ public sealed class Signature
 
     private Signature() { }
 
-    internal Signature(Grant grant, Person by, Statement statement, Meaning meaning, string? gapReason, DateTime at)
+    internal Signature(Grant grant, Person by, Statement statement, Meaning meaning, SealedText? gap, DateTime at)
     {
         (GrantId, Place, HolderId, SignerId, At) = (grant.Id, Director, grant.HolderId, by.Id, at);
-        (Meaning, GapReason, Text, Digest) = (meaning, gapReason, statement.Text, statement.Digest);
+        (Meaning, GapReason, GapSalt, Text, Digest) = (meaning, gap?.Text, gap?.Salt, statement.Text, statement.Digest);
     }
 }
 
@@ -42,11 +44,12 @@ public sealed class Decline
     public Guid ById { get; private init; }
     public Person By { get; private init; } = null!;
     public string Reason { get; private init; } = "";
+    public string ReasonSalt { get; private init; } = "";
     public DateTime At { get; private init; }
 
     private Decline() { }
 
-    internal Decline(Grant grant, Person by, string reason, DateTime at) => (GrantId, ById, Reason, At) = (grant.Id, by.Id, reason, at);
+    internal Decline(Grant grant, Person by, SealedText reason, DateTime at) => (GrantId, ById, Reason, ReasonSalt, At) = (grant.Id, by.Id, reason.Text, reason.Salt, at);
 }
 
 /// <summary>From this moment on the grant no longer stands; what was signed keeps its evidence.</summary>
@@ -56,11 +59,12 @@ public sealed class Ending
     public Guid ById { get; private init; }
     public Person By { get; private init; } = null!;
     public string Reason { get; private init; } = "";
+    public string ReasonSalt { get; private init; } = "";
     public DateTime At { get; private init; }
 
     private Ending() { }
 
-    internal Ending(Grant grant, Person by, string reason, DateTime at) => (GrantId, ById, Reason, At) = (grant.Id, by.Id, reason, at);
+    internal Ending(Grant grant, Person by, SealedText reason, DateTime at) => (GrantId, ById, Reason, ReasonSalt, At) = (grant.Id, by.Id, reason.Text, reason.Salt, at);
 }
 
 /// <summary>A sealed paper as it was issued. The random code is all that a stranger can look up.</summary>

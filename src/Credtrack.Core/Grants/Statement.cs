@@ -54,5 +54,5 @@ public sealed record Statement(
     public static string Seal(IEnumerable<Finding> findings) =>
         Hex(string.Join('\n', findings.Select(f => $"{f.Scan} {f.Verdict} {f.Reason} {f.Seen.Result} {f.Seen.Reading?.Quality}")));
 
-    private static string Hex(string text) => Convert.ToHexStringLower(SHA256.HashData(Encoding.UTF8.GetBytes(text)));
+    internal static string Hex(string text) => Convert.ToHexStringLower(SHA256.HashData(Encoding.UTF8.GetBytes(text)));
 }

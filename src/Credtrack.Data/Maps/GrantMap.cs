@@ -9,6 +9,8 @@ internal sealed class GrantMap : IEntityTypeConfiguration<Grant>, IEntityTypeCon
     {
         grant.ToTable("Grants");
         grant.Ignore(g => g.Signature);
+        grant.HasIndex(g => g.HolderId); // the next one leaves out, in one database, what is over
+        grant.HasIndex(g => new { g.HolderId, g.ProgrammeId, g.ApplicationId, g.IsOpen }).IsUnique();
         grant.HasOne(g => g.Holder).WithMany().HasForeignKey(g => g.HolderId);
         grant.HasOne(g => g.ProposedBy).WithMany().HasForeignKey(g => g.ProposedById);
         grant.HasOne(g => g.Decline).WithOne().HasForeignKey<Decline>(d => d.GrantId);
@@ -23,6 +25,8 @@ internal sealed class GrantMap : IEntityTypeConfiguration<Grant>, IEntityTypeCon
     public void Configure(EntityTypeBuilder<Signature> signature)
     {
         signature.ToTable("Signatures", t => t.HasCheckConstraint("CK_Signatures_not_ones_own", "\"SignerId\" <> \"HolderId\""));
+        signature.Ignore(s => s.Gap);
+        signature.Property(s => s.GapSalt).HasMaxLength(SealedText.SaltLength);
         signature.HasKey(s => new { s.GrantId, s.Place });
         signature.HasOne(s => s.Signer).WithMany().HasForeignKey(s => s.SignerId);
         signature.Property(s => s.GapReason).HasMaxLength(Grant.LongestReason);
@@ -35,6 +39,7 @@ internal sealed class GrantMap : IEntityTypeConfiguration<Grant>, IEntityTypeCon
     {
         decline.ToTable("Declines");
         decline.HasKey(d => d.GrantId);
+        decline.Property(d => d.ReasonSalt).HasMaxLength(SealedText.SaltLength);
         decline.Property(d => d.Reason).HasMaxLength(Grant.LongestReason);
         decline.HasOne(d => d.By).WithMany().HasForeignKey(d => d.ById);
         decline.Navigation(d => d.By).AutoInclude();
@@ -44,6 +49,7 @@ internal sealed class GrantMap : IEntityTypeConfiguration<Grant>, IEntityTypeCon
     {
         ending.ToTable("Endings");
         ending.HasKey(e => e.GrantId);
+        ending.Property(e => e.ReasonSalt).HasMaxLength(SealedText.SaltLength);
         ending.Property(e => e.Reason).HasMaxLength(Grant.LongestReason);
         ending.HasOne(e => e.By).WithMany().HasForeignKey(e => e.ById);
         ending.Navigation(e => e.By).AutoInclude();

@@ -20,6 +20,7 @@ public static class Invite
             await error.WriteLineAsync(Usage);
             return 2;
         }
+        await services.Migrate(); // it may be the first thing that is run here
         await using var scope = services.CreateAsyncScope();
         await Write(scope.ServiceProvider, output);
         return 0;

@@ -3,19 +3,35 @@ using Credtrack.Web.Features.Documents.Seals;
 
 namespace Credtrack.Web.Commands;
 
-/// <summary>The commands that ask the site's own database. They change nothing and serve nothing.</summary>
+/// <summary>The commands that use the site's own database and serve nothing. But for invite they change nothing.</summary>
 public static class SiteCommands
 {
+    public static bool Are(string[] args) => args is ["check" or "verify" or "invite", ..];
+
     /// <summary>The exit status of the command, or null if the arguments are none.</summary>
     public static async Task<int?> Run(string[] args, IServiceProvider services)
     {
-        if (args is not [("check" or "verify" or "invite") and var command, .. var rest]) return null;
+        if (!Are(args) || args is not [var command, .. var rest]) return null;
         if (command == "invite") return await Invite.Run(rest, Console.Out, Console.Error, services);
         if (command == "check" && rest.Length == 0) return await Check.Run(rest, Console.Out, Console.Error);
         await using var scope = services.CreateAsyncScope();
-        var db = scope.ServiceProvider.GetRequiredService<CredtrackDb>();
+        var (db, settings) = (scope.ServiceProvider.GetRequiredService<CredtrackDb>(), services.GetRequiredService<Settings>());
+        if (await WhyNotAsk(db) is { } why) return await Refused(why);
         if (command == "verify") return await Verify.Run(rest, Console.Out, Console.Error, db);
-        return await Check.Run(rest, Console.Out, Console.Error, services.GetRequiredService<SealingCertificate>().Trust, sha256 => Find(db, sha256));
+        if (!File.Exists(settings.Seal.Certificate)) return await Refused($"There is no certificate of the seal, {settings.Seal.Certificate}: this site has sealed nothing yet.");
+        return await Check.Run(rest, Console.Out, Console.Error, services.GetRequiredService<SealTrust>(), sha256 => Find(db, sha256));
+    }
+
+    // Asked before anything else, because looking for a table, or for the key of the seal, would make what is not there.
+    private static async Task<string?> WhyNotAsk(CredtrackDb db) =>
+          !await db.Database.CanConnectAsync()                   ? "There is no database here: see ConnectionStrings:Credtrack, or start the program once, which makes it."
+        : (await db.Database.GetPendingMigrationsAsync()).Any()  ? "The database is not that of this version: start the program once, which brings it up to date."
+        : null;
+
+    private static async Task<int> Refused(string why)
+    {
+        await Console.Error.WriteLineAsync(why);
+        return 2;
     }
 
     private static async Task<StoredDocument?> Find(CredtrackDb db, string sha256) => await CheckAnswer.OfDigest(db, sha256) is { } answer

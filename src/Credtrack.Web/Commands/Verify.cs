@@ -1,6 +1,6 @@
 namespace Credtrack.Web.Commands;
 
-/// <summary>Checks that no entry of the ledger was changed, removed or moved. Exit status 0 if all chains are whole, 1 if not, 2 for wrong use.</summary>
+/// <summary>Checks that no entry of the ledger was changed, removed or moved, and that what was signed, declined, ended and issued is still what the ledger says. Exit status 0 if all is whole, 1 if not, 2 for wrong use.</summary>
 public static class Verify
 {
     public const string Usage = "usage: verify";
@@ -8,7 +8,7 @@ public static class Verify
         + "They show only against a root of all chains kept outside this machine, which this version does not write yet.";
 
     /// <param name="args">What follows the word verify: nothing.</param>
-    /// <param name="output">One line for each bad place, the first one first, then how many chains are whole and what is not seen.</param>
+    /// <param name="output">One line for each bad place, the first one first, and for each row that the ledger speaks of otherwise; then how many chains are whole and what is not seen.</param>
     public static async Task<int> Run(string[] args, TextWriter output, TextWriter error, CredtrackDb db)
     {
         if (args.Length > 0)
@@ -24,11 +24,27 @@ public static class Verify
             if (!await Rows.CanBeRead(async () => Write(output, await walk.BreaksOf(subject)))) Write(output, [new(subject, 1, LedgerFault.Unreadable)]);
         }
         if (!isReadable) await output.WriteLineAsync(walk.At is { } at ? $"subject {at.SubjectId}: what stands behind entry {at.Number} cannot be read" : "the first entry of all cannot be read");
+        var areRowsAsTold = await AreRowsAsTold(output, db);
         await output.WriteLineAsync(!isReadable ? $"The walk ended after {walk.Entries} entries."
             : walk.Broken.Count > 0 ? $"{walk.Chains} chains, {walk.Entries} entries: {walk.Broken.Count} broken."
             : $"{walk.Chains} chains, {walk.Entries} entries: whole.");
         await output.WriteLineAsync(NotSeen);
-        return isReadable && walk.Broken.Count == 0 ? 0 : 1;
+        return isReadable && walk.Broken.Count == 0 && areRowsAsTold ? 0 : 1;
+    }
+
+    private static async Task<bool> AreRowsAsTold(TextWriter output, CredtrackDb db)
+    {
+        var altered = 0;
+        var areReadable = await Rows.CanBeRead(async () =>
+        {
+            await foreach (var row in RowWalk.Of(db))
+            {
+                altered++;
+                await output.WriteLineAsync($"subject {row.SubjectId}{(row.Number is { } number ? $", entry {number}: its row is not what this entry, {row.Fact}, says" : $": a row of which no entry {row.Fact} speaks")}");
+            }
+        });
+        if (!areReadable) await output.WriteLineAsync("A grant, or what the ledger says of it, cannot be read.");
+        return areReadable && altered == 0;
     }
 
     private static void Write(TextWriter output, IEnumerable<LedgerBreak> breaks)

@@ -12,6 +12,8 @@ public static class Accounts
 
     public static void AddAccounts(this IServiceCollection services, Settings settings)
     {
+        services.AddAuthentication(IdentityConstants.ApplicationScheme).AddIdentityCookies(cookies => cookies.ApplicationCookie!.Configure(SignInCookie.Configure(settings)));
+        services.AddIdentityCore<Account>().AddEntityFrameworkStores<CredtrackDb>().AddSignInManager();
         services.Configure<PasswordHasherOptions>(options => options.IterationCount = HashRounds);
         SecretFile.Folder(settings.KeyFolder);
         services.AddDataProtection().SetApplicationName("Credtrack").PersistKeysToFileSystem(new DirectoryInfo(settings.KeyFolder));

@@ -1,3 +1,5 @@
+using System.Text.Json;
+
 namespace Credtrack.Web.Plumbing;
 
 /// <summary>Rows that somebody wrote past this program: a value that no column of this kind can hold is a finding, not a fault of ours.</summary>
@@ -17,5 +19,5 @@ public static class Rows
         }
     }
 
-    private static bool IsOddValue(Exception fault) => fault is FormatException or InvalidCastException or OverflowException or ArgumentOutOfRangeException;
+    private static bool IsOddValue(Exception fault) => fault is FormatException or JsonException or InvalidCastException or OverflowException or ArgumentOutOfRangeException;
 }

@@ -106,5 +106,18 @@ public sealed class GrantTests
         grant.Sign(cast.Director, Texts.Of(met: false), Meaning.Granted, "hush-4711", Cast.Noon);
         grant.End(cast.Director, "hush-4711", Cast.Noon);
         Assert.All(grant.NewFacts, f => Assert.DoesNotContain("hush", f.Sentence, StringComparison.Ordinal));
+        Assert.Equal([grant.Signature!.Gap!.Seal], grant.NewFacts.OfType<GrantSigned>().Select(f => f.GapSeal));
+        Assert.Equal([new SealedText("hush-4711", grant.Ending!.ReasonSalt).Seal], grant.NewFacts.OfType<GrantEnded>().Select(f => f.ReasonSeal));
+        Assert.NotEqual(grant.Signature.GapSalt, grant.Ending.ReasonSalt);
+    }
+
+    [Fact]
+    public void It_is_open_until_it_is_declined_or_ended()
+    {
+        var (declined, signed) = (Proposed(), Signed());
+        Assert.Equal((true, true), (declined.IsOpen, signed.IsOpen));
+        declined.TurnDown(cast.Director, "Too early.", Cast.Noon);
+        signed.End(cast.Director, "Left.", Cast.Noon);
+        Assert.Equal((null, null), (declined.IsOpen, signed.IsOpen));
     }
 }

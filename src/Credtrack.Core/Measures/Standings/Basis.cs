@@ -1,3 +1,4 @@
+using Credtrack.Core.Rulebooks.Requirements;
 using Credtrack.Core.Scans;
 
 namespace Credtrack.Core.Measures.Standings;
@@ -14,6 +15,10 @@ public sealed record Basis(DateOnly AsOf, IReadOnlyList<Finding> Findings)
     public IEnumerable<SeenScan> Counting => Findings.Where(f => f.Verdict == Verdict.Counts).Select(f => f.Seen);
 
     public IEnumerable<SeenScan> Pending => Findings.Where(f => f.Verdict == Verdict.Pending).Select(f => f.Seen);
+
+    /// <summary>What there is of each requirement, named by the place where it is asked for and its number there.</summary>
+    internal IReadOnlyList<RequirementStanding> Measure(string place, IEnumerable<Requirement> asked) =>
+        [.. asked.Select((requirement, at) => requirement.Measure(this) with { Name = $"{place}:{at + 1}" })];
 
     /// <summary>Read scans performed by the trainee, neither duplicate nor introductory, whatever the counting filter says.</summary>
     public IEnumerable<SeenScan> Population => Findings

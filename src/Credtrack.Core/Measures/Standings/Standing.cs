@@ -1,5 +1,4 @@
 using Credtrack.Core.Rulebooks;
-using Credtrack.Core.Rulebooks.Requirements;
 
 namespace Credtrack.Core.Measures.Standings;
 
@@ -12,16 +11,20 @@ public sealed record Standing(
 
     public bool Met => Applications.All(a => a.Met) && Groups.All(g => g.Met) && Overall.Met && Items.Met;
 
+    /// <summary>All that is asked, whatever of.</summary>
+    public IEnumerable<RequirementStanding> Requirements =>
+        [.. Applications.SelectMany(a => a.Requirements), .. Groups.SelectMany(g => g.Requirements), .. Overall.Requirements, .. Items.Requirements];
+
     /// <summary>Evaluates one person's evidence, whose scan ids are unique, in any order. Days are calendar days in the rulebook's zone.</summary>
     public static Standing Of(Rules rules, IEnumerable<ScanEvidence> scans, IEnumerable<ItemEvidence> items, DateOnly asOf)
     {
         var findings = Trace.Of(rules, scans, asOf);
         var byApplication = findings.ToLookup(f => f.Application, StringComparer.Ordinal);
         var applications = rules.Applications.Select(a => ApplicationStanding.Of(a, new Basis(asOf, [.. byApplication[a.Code]]))).ToList();
-        var groups = rules.Groups.Select(g => GroupStanding.Of(g, new Basis(asOf, Within(findings, g.Applications))));
+        var groups = rules.Groups.Select((g, at) => GroupStanding.Of(g, at + 1, new Basis(asOf, Within(findings, g.Applications))));
         var all = new Basis(asOf, Within(findings, rules.Applications.Select(a => a.Code))) { Applications = applications };
         var done = new Basis(asOf, []) { Items = [.. items.Where(item => LocalTimes.DayOf(item.At, rules.Zone) <= asOf)] };
-        return new(rules, asOf, applications, [.. groups], SectionStanding.Of(rules.Overall, all), SectionStanding.Of(rules.Items, done), findings);
+        return new(rules, asOf, applications, [.. groups], new(all.Measure("overall", rules.Overall)), new(done.Measure("items", rules.Items)), findings);
     }
 
     private static List<Finding> Within(IReadOnlyList<Finding> findings, IEnumerable<string> codes)
@@ -43,7 +46,7 @@ public sealed record ApplicationStanding(
     internal static ApplicationStanding Of(ApplicationRules rules, Basis basis)
     {
         var excluded = basis.Findings.Where(f => f.Reason is not null).GroupBy(f => f.Reason!, StringComparer.Ordinal).ToDictionary(g => g.Key, g => g.Count(), StringComparer.Ordinal);
-        return new(rules, basis.Counting.Count(), basis.Pending.Count(), excluded, [.. rules.Require.Select(r => r.Measure(basis))]);
+        return new(rules, basis.Counting.Count(), basis.Pending.Count(), excluded, basis.Measure($"application:{rules.Code}", rules.Require));
     }
 }
 
@@ -53,13 +56,11 @@ public sealed record GroupStanding(GroupRules Rules, IReadOnlyList<RequirementSt
     public string Name => Rules.Name;
     public bool Met => Requirements.All(r => r.Met);
 
-    internal static GroupStanding Of(GroupRules rules, Basis basis) => new(rules, [.. rules.Require.Select(r => r.Measure(basis))]);
+    internal static GroupStanding Of(GroupRules rules, int number, Basis basis) => new(rules, basis.Measure($"group:{number}", rules.Require));
 }
 
 /// <summary>The overall requirements, or the items. With none, it is met.</summary>
 public sealed record SectionStanding(IReadOnlyList<RequirementStanding> Requirements)
 {
     public bool Met => Requirements.All(r => r.Met);
-
-    internal static SectionStanding Of(IReadOnlyList<Requirement> require, Basis basis) => new([.. require.Select(r => r.Measure(basis))]);
 }

@@ -11,8 +11,9 @@ public sealed record ApplicationsMeeting(long Min, long? AtLeast) : Requirement
 
     public override RequirementStanding Measure(Basis basis)
     {
-        var value = basis.Applications.Count(a => AtLeast is { } least ? a.Counted >= least : a.Met);
-        return new(this, value >= Min, value) { Min = Min, Missing = Math.Max(0, Min - value) };
+        var meeting = basis.Applications.Where(a => AtLeast is { } least ? a.Counted >= least : a.Met).Select(a => a.Code).ToHashSet(StringComparer.Ordinal);
+        var value = meeting.Count;
+        return new(this, value >= Min, value) { Behind = [.. basis.Counting.Where(scan => meeting.Contains(scan.Evidence.Application))], Min = Min, Missing = Math.Max(0, Min - value) };
     }
 
     public override string Lacks(RequirementStanding standing) => Words(standing.Missing ?? 0);

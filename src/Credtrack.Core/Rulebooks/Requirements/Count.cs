@@ -14,9 +14,9 @@ public sealed record Count(long Min, long? Target, Filter? Where, bool Overall) 
 
     public override RequirementStanding Measure(Basis basis)
     {
-        var value = basis.Counting.Count(scan => Where?.Matches(scan) ?? true);
+        var behind = basis.Counting.Where(scan => Where?.Matches(scan) ?? true).ToList();
         var possible = basis.Pending.Count(scan => Where?.MayMatch(scan) ?? true);
-        return new(this, value >= Min, value) { Min = Min, Missing = Math.Max(0, Min - value), Pending = possible };
+        return new(this, behind.Count >= Min, behind.Count) { Behind = behind, Min = Min, Missing = Math.Max(0, Min - behind.Count), Pending = possible };
     }
 
     public override string Lacks(RequirementStanding standing) => (Where ?? Any).Scans(standing.Missing ?? 0);

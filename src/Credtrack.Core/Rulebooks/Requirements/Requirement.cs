@@ -1,3 +1,4 @@
+using System.Globalization;
 using Credtrack.Core.Measures.Standings;
 
 namespace Credtrack.Core.Rulebooks.Requirements;
@@ -15,7 +16,11 @@ public abstract record Requirement
     /// <summary>What is asked, in words.</summary>
     public abstract string Asks { get; }
 
+    /// <summary>What there is of it, with the scans behind the value: the value is their number, or taken from it.</summary>
     public abstract RequirementStanding Measure(Basis basis);
+
+    /// <summary>A value or a bound as people read it.</summary>
+    public virtual string Says(double number) => number.ToString(CultureInfo.InvariantCulture);
 
     /// <summary>What is missing, in words, where it is not met.</summary>
     public abstract string Lacks(RequirementStanding standing);

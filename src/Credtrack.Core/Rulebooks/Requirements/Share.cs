@@ -20,14 +20,17 @@ public sealed record Share(Filter Where, Filter? Of, double? Min, double? Max) :
     public override RequirementStanding Measure(Basis basis)
     {
         var all = basis.Counting.Where(scan => Of?.Matches(scan) ?? true).ToList();
-        double? value = all.Count == 0 ? null : (double)all.Count(Where.Matches) / all.Count;
+        var behind = all.Where(Where.Matches).ToList();
+        double? value = all.Count == 0 ? null : (double)behind.Count / all.Count;
         // Without a value a lower bound does not hold and an upper one does.
         var met = (Min is null || value >= Min) && (Max is null || value is null || value <= Max);
-        return new(this, met, value) { Min = Min, Max = Max, N = all.Count };
+        return new(this, met, value) { Behind = behind, Among = all, Min = Min, Max = Max, N = all.Count };
     }
 
     public override string Lacks(RequirementStanding standing) =>
         standing.Value is null ? $"{Asks}; no scan to take it from yet" : $"{Asks}; {Percent(standing.Value)} so far";
+
+    public override string Says(double number) => Percent(number);
 
     private static string Percent(double? share) => (share * 100)?.ToString("0.##", CultureInfo.InvariantCulture) + " %";
 

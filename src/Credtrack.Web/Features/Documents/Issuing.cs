@@ -8,9 +8,12 @@ namespace Credtrack.Web.Features.Documents;
 /// <summary>From a signed grant to the sealed paper that leaves the house: drawn, sealed and kept, once.</summary>
 public sealed class Issuing(SealingCertificate certificate, Settings settings)
 {
-    /// <summary>Why the paper could not be drawn, in words, or null; asked before anything is signed.</summary>
+    /// <summary>Why nothing could be sealed, whatever it is, in words, or null.</summary>
+    public string? WhyNotSeal(DateTime at) => certificate.WhyNot(at);
+
+    /// <summary>Why this paper could not be drawn and sealed, in words, or null; asked before anything is signed.</summary>
     public string? WhyNot(Statement statement, Person signer, string? gapReason, Site site, DateTime at) =>
-        CompetencySummary.WhyNotDraw(Facts(statement, signer, Meaning.Granted, gapReason, at, site, DocumentCode.New()));
+        WhyNotSeal(at) ?? CompetencySummary.WhyNotDraw(Facts(statement, signer, Meaning.Granted, gapReason, at, site, DocumentCode.New()));
 
     public void Issue(Grant grant, Statement statement, Person signer, Site site)
     {

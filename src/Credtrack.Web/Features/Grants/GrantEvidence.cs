@@ -5,8 +5,8 @@ using Credtrack.Web.Features.Standings;
 
 namespace Credtrack.Web.Features.Grants;
 
-/// <summary>What there is on a day for one grant: the standing of its application, and the text that would be signed over it.</summary>
-public sealed record GrantEvidence(Grant Grant, string Holder, string Application, string Code, ApplicationStanding? Evaluated, Statement Statement)
+/// <summary>What there is on a day for one grant: the text that would be signed, and of each of its requirements, in the same order, the scans behind; null where only the plain number of counting scans is asked for.</summary>
+public sealed record GrantEvidence(Grant Grant, string Holder, string Application, string Code, bool IsListed, Statement Statement, IReadOnlyList<RequirementStanding?> Behind)
 {
     public static async Task<GrantEvidence> Load(CredtrackDb db, Site site, Grant grant, DateOnly today)
     {
@@ -18,22 +18,22 @@ public sealed record GrantEvidence(Grant Grant, string Holder, string Applicatio
         var standing = rules is null ? null : Core.Measures.Standings.Standing.Of(rules, evidence, [], today);
         var application = standing?.Applications.FirstOrDefault(a => a.Code == names.Code);
         var findings = standing?.Findings.Where(f => f.Application == names.Code).ToList() ?? [];
+        var asked = Asked(standing, application);
         var statement = new Statement(site.Name, names.Holder, grant.HolderId, names.Programme, grant.Privilege, names.Application, today,
             findings.Count, findings.Count(f => f.Seen.IsRead), findings.Count(f => f.Verdict == Verdict.Counts),
-            Requirements(standing, application), rulebook?.Name ?? "none", rulebook?.Edition ?? 0, Statement.Seal(findings)) { Required = application is null ? null : StandingLine.Of(standing!, application, names.Application).Depth?.Required };
-        return new(grant, names.Holder, names.Application, names.Code, application, statement);
+            [.. asked.Select(a => a.Said)], rulebook?.Name ?? "none", rulebook?.Edition ?? 0, Statement.Seal(findings)) { Required = application is null ? null : StandingLine.Of(standing!, application, names.Application).Depth?.Required };
+        return new(grant, names.Holder, names.Application, names.Code, application is not null, statement, [.. asked.Select(a => a.Behind)]);
     }
 
     /// <summary>All that bears on this application: its own, those of the groups it belongs to, and those of the whole rulebook.</summary>
-    private static List<Evidenced> Requirements(Core.Measures.Standings.Standing? standing, ApplicationStanding? application)
+    private static List<(Evidenced Said, RequirementStanding? Behind)> Asked(Core.Measures.Standings.Standing? standing, ApplicationStanding? application)
     {
-        if (standing is null || application is null) return [new("a rulebook that lists this application", "none does", false)];
-        var own = application.Requirements.Select(r => new Evidenced(r.Asks, Value(r), r.Met)).ToList();
-        if (own.Count == 0) own.Add(new("a scan that counts", application.Counted.ToString(CultureInfo.InvariantCulture), application.Met));
-        var groups = standing.Groups.Where(g => g.Rules.Applications.Contains(application.Code)).SelectMany(g => g.Requirements.Select(r => new Evidenced($"{g.Name}: {r.Asks}", Value(r), r.Met)));
-        return [.. own, .. groups, .. standing.Overall.Requirements.Select(r => new Evidenced(r.Asks, Value(r), r.Met))];
+        if (standing is null || application is null) return [(new("a rulebook that lists this application", "none does", false), null)];
+        var own = application.Requirements.Select(r => Of(r)).ToList();
+        if (own.Count == 0) own.Add((new("a scan that counts", application.Counted.ToString(CultureInfo.InvariantCulture), application.Met), null));
+        var groups = standing.Groups.Where(g => g.Rules.Applications.Contains(application.Code)).SelectMany(g => g.Requirements.Select(r => Of(r, $"{g.Name}: ")));
+        return [.. own, .. groups, .. standing.Overall.Requirements.Select(r => Of(r))];
     }
 
-    private static string Value(RequirementStanding requirement) => requirement.Value is not { } value ? "nothing to take it from"
-        : requirement.Missing is not null ? value.ToString(CultureInfo.InvariantCulture) : $"{(value * 100).ToString("0.#", CultureInfo.InvariantCulture)} %";
+    private static (Evidenced Said, RequirementStanding? Behind) Of(RequirementStanding requirement, string whose = "") => (new(whose + requirement.Asks, requirement.Said, requirement.Met), requirement);
 }

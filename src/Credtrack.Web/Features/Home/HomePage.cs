@@ -29,7 +29,7 @@ public sealed record HomePage(IReadOnlyList<ToDoLine>? ToDo, int Waiting, Standi
         var open = await own.OrderByDescending(s => s.PerformedAt).Where(s => !s.Submissions.Any(x => x.Return == null) || (s.Pictures.All(p => p.RemovedAt != null) && (s.SupervisorId == null || s.Confirmations.Any(c => !c.WasThere)))).Take(20)
             .Select(s => new { Scan = s, Application = s.Application.Name }).ToListAsync();
         var waiting = await own.CountAsync(s => s.Submissions.Any(x => x.Return == null));
-        var standing = await StandingPage.Load(db, me, person.Id, new StandingQuery(null, null, null, null), today);
+        var standing = await StandingPage.Load(db, me, person.Id, new StandingQuery(), today);
         var todo = open.Select(o => new ToDoLine(o.Scan.Id, o.Application, o.Scan.PerformedAt, o.Scan.State, o.Scan.ReturnedWith?.Missing ?? (o.Scan.State == ScanState.Waiting ? o.Scan.WhyIncomplete : null)))
             .Where(t => t.State != ScanState.Waiting || t.Missing is not null).OrderByDescending(t => t.State);
         return new([.. todo], waiting, standing?.NearestGaps.FirstOrDefault(), bench, programmes);

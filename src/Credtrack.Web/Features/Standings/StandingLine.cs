@@ -41,8 +41,8 @@ public sealed record StandingLine(string Code, string Name, Depth? Depth, Applic
         var (_, pending) => $"{pending} {(pending == 1 ? "waits" : "wait")} for a reading.",
     };
 
-    /// <summary>All that is asked beside the plain count, with what there is of it.</summary>
-    public IEnumerable<string> Conditions => Standing.Requirements.Where(r => r.Asked is not Count { Where: null }).Select(r => r.Met ? $"{r.Asks}: met" : r.Missing is { } missing ? $"{r.Asks}: {missing} missing" : r.Lacks!);
+    /// <summary>All that is asked beside the plain count.</summary>
+    public IEnumerable<RequirementStanding> Conditions => Standing.Requirements.Where(r => r.Asked is not Count { Where: null });
 
     public static StandingLine Of(Standing standing, ApplicationStanding application, string name)
     {

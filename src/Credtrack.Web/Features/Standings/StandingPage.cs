@@ -4,9 +4,6 @@ using Credtrack.Core.Rulebooks;
 
 namespace Credtrack.Web.Features.Standings;
 
-/// <summary>AsOf: the day; Programme: under whose rulebook; the rest picks from the list of scans.</summary>
-public sealed record StandingQuery(DateOnly? AsOf, Guid? Programme, Verdict? Verdict, string? Application, int Shown = 50);
-
 /// <summary>A grant that stands or waits, with its sealed paper.</summary>
 public sealed record GrantedLine(Guid Id, string Privilege, GrantState State, DateTime? SignedAt, Guid? DocumentId)
 {
@@ -20,12 +17,15 @@ public sealed record GrantedLine(Guid Id, string Privilege, GrantState State, Da
 
 public sealed record StandingPage(
     Person Trainee, Rulebook? Rulebook, IReadOnlyList<Membership> Programmes, Membership Membership, DateOnly AsOf, DateOnly Today, StandingQuery Query,
-    Standing? Standing, IReadOnlyList<StandingLine> Lines, IReadOnlyList<TraceLine> Trace, int Elsewhere)
+    Standing? Standing, IReadOnlyList<StandingLine> Lines, IReadOnlyList<TraceLine> Trace)
 {
     public IReadOnlyList<GrantedLine> Grants { get; private init; } = [];
 
     /// <summary>Whether the viewer may propose a grant from here.</summary>
     public bool Proposes { get; private init; }
+
+    /// <summary>The scans that the query picks; only where there is a standing.</summary>
+    public Selection Selected => Selection.Of(Standing!, Trace, Query);
 
     public string Address => $"~/standings/{Trainee.Id}?asOf={AsOf.Iso()}&programme={Membership.ProgrammeId}";
     public int Counting => Standing!.Findings.Count(f => f.Verdict == Verdict.Counts);
@@ -39,10 +39,6 @@ public sealed record StandingPage(
     public IEnumerable<(string Name, RequirementStanding Requirement)> Together =>
         [.. Standing!.Groups.SelectMany(g => g.Requirements.Select(r => (g.Name, r))), .. Standing.Overall.Requirements.Select(r => ("All together", r))];
 
-    /// <summary>By verdict only what is open: being on such a list would tell what came of a reading.</summary>
-    public IReadOnlyList<TraceLine> Matching =>
-        [.. Trace.Where(t => (Query.Verdict is null || (!t.IsClosed && t.Finding.Verdict == Query.Verdict)) && (Query.Application is null || t.Finding.Application == Query.Application))];
-
     public static async Task<StandingPage?> Load(CredtrackDb db, Me me, Guid personId, StandingQuery query, DateOnly today)
     {
         var trainee = await db.TraineesVisibleTo(me.Person).AsNoTracking().Include(p => p.Memberships).ThenInclude(m => m.Leaves).SingleOrDefaultAsync(p => p.Id == personId);
@@ -51,13 +47,13 @@ public sealed record StandingPage(
             .OrderByDescending(m => m.FirstDay).ToList();
         var membership = programmes.Find(m => m.ProgrammeId == query.Programme) ?? programmes[0];
         var (asOf, rulebook) = (Within(query.AsOf ?? today), await db.RulebookInForce(membership.ProgrammeId));
-        if (rulebook is null) return new(trainee, null, programmes, membership, asOf, today, query, null, [], [], 0);
+        if (rulebook is null) return new(trainee, null, programmes, membership, asOf, today, query, null, [], []);
         var standing = Standing.Of(RulesOf.Read(rulebook, me.Site), (await db.EvidenceOf([personId]))[personId], [], asOf);
         var names = await db.Applications.ToDictionaryAsync(a => a.Code, a => a.Name);
         var trace = await TraceLine.Load(db, me.Person, personId, standing, names);
         return new(trainee, rulebook, programmes, membership, asOf, today, query, standing,
             [.. standing.Applications.Select(a => StandingLine.Of(standing, a, a.Rules.Name ?? names.GetValueOrDefault(a.Code, a.Code)))],
-            trace, standing.Findings.Count - trace.Count)
+            trace)
         {
             Grants = await GrantedLine.Load(db, me.Person, personId),
             Proposes = personId != me.Person.Id && me.Person.Is(MembershipKind.Director, membership.ProgrammeId),

@@ -70,6 +70,25 @@ public sealed class RequirementTests
         Assert.Equal((4.0, 2), (groups[0].Requirements[0].Value, groups[0].Requirements[0].Pending));
     }
 
+    [Fact]
+    public void Each_names_the_scans_behind_its_value_and_a_share_those_from_which_it_is_taken()
+    {
+        var rules = Book.Read("""
+            "applications": [
+              { "code": "cardiac", "require": [{ "kind": "count", "min": 2 }, { "kind": "count", "min": 1, "where": { "positive": true } }, { "kind": "share", "where": { "positive": true }, "of": { "setting": ["clinical"] }, "min": 0.5 }] },
+              { "code": "lung", "require": [] }],
+            "groups": [{ "name": "chest", "applications": ["cardiac", "lung"], "require": [{ "kind": "count", "min": 1, "where": { "positive": false } }] }],
+            "overall": [{ "kind": "count", "min": 9 }, { "kind": "applications", "min": 1, "meeting": { "count": 2 } }]
+            """);
+        var standing = rules.On([Book.Scan("a").As(Result.TP), Book.Scan("b").As(Result.TN), Book.Scan("c").As(Result.FN) with { Setting = Setting.Simulation }, Book.Scan("d").As(Result.FP) with { Application = "lung" }]);
+        Assert.Equal(["application:cardiac:1 a b c", "application:cardiac:2 a c", "application:cardiac:3 a of a b", "group:1:1 b d", "overall:1 a b c d", "overall:2 a b c"],
+            standing.Requirements.Select(r => $"{r.Name} {Ids(r.Behind)}{(r.Among is null ? "" : $" of {Ids(r.Among)}")}"));
+        Assert.All(standing.Requirements.Where(r => r.Kind == "count"), r => Assert.Equal(r.Behind.Count, r.Value));
+        Assert.All(standing.Requirements.Where(r => r.Kind == "share"), r => Assert.Equal(((double)r.Behind.Count / r.N, r.N), (r.Value, r.Among?.Count)));
+
+        static string Ids(IEnumerable<SeenScan> scans) => string.Join(' ', scans.Select(s => s.Evidence.Scan));
+    }
+
     private static RequirementStanding Measured(string json, ScanEvidence[] scans) =>
         Book.Cardiac($$""" "require": [{{json}}] """).On(scans).Applications[0].Requirements[0];
 }

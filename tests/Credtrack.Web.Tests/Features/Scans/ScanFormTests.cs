@@ -61,6 +61,20 @@ public sealed class ScanFormTests(RunningSite site) : IClassFixture<RunningSite>
     }
 
     [Fact]
+    public async Task What_is_wrong_is_listed_in_the_order_in_which_the_fields_stand_on_the_page()
+    {
+        using var trainee = await (await site.NewWorld()).Starts("msk");
+        trainee.Fills("Thermal index (TI)", "hot").Fills("Note", new string('n', 5000)).Fills("Depth cm", "deep").Fills("When was it performed?", "");
+        await trainee.Presses(Logging.Submit);
+        var (all, links) = (trainee.Page.All.ToList(), trainee.Page.QuerySelectorAll(".notice.bad a").Select(a => a.GetAttribute("href")![1..]).ToList());
+        // Questions are one field of the form: among themselves they keep the order in which they were looked at.
+        var places = links.DistinctBy(id => string.Join('_', id.Split('_').Take(2))).Select(id => all.FindIndex(e => e.Id == id)).ToList();
+        Assert.True(places.Count > 5, string.Join(' ', links));
+        Assert.DoesNotContain(-1, places);
+        Assert.Equal(places.Order(), places);
+    }
+
+    [Fact]
     public async Task Whatever_a_reader_would_miss_is_asked_for()
     {
         var world = await site.NewWorld();

@@ -6,8 +6,8 @@ namespace Credtrack.Web.Features.Documents.Certificates;
 /// <summary>The public certificates of the seal, for whoever wants to check a file without us. The key is not among them.</summary>
 [Route("documents/certificates")]
 [AllowAnonymous]
-public sealed class CertificatesController(SealingCertificate certificate) : Controller
+public sealed class CertificatesController(SealTrust trust) : Controller
 {
     [HttpGet("")]
-    public IActionResult Index() => Content(certificate.Trust.Pem, "application/x-pem-file");
+    public IActionResult Index() => Content(trust.Pem, "application/x-pem-file");
 }

@@ -14,10 +14,10 @@ public sealed record CheckAnswer(Holding Holding, string Sentence, string? Code,
         await Find(db, d => d.Code == code) ?? Unconfirmed("No document with this number was issued here. Look at each letter again; if it stays so, do not rely on the paper.");
 
     /// <summary>The bytes must be those that were issued; a seal that verifies on other bytes is not enough where the stored digest is at hand.</summary>
-    public static async Task<CheckAnswer> OfFile(CredtrackDb db, byte[] file, SealingCertificate certificate)
+    public static async Task<CheckAnswer> OfFile(CredtrackDb db, byte[] file, SealTrust trust)
     {
         if (await OfDigest(db, Digest(file)) is { } ours) return ours;
-        var finding = SealCheck.Of(file, certificate.Trust);
+        var finding = SealCheck.Of(file, trust);
         return Unconfirmed(finding.IsGood ? "The seal is ours, but these are not the bytes that were issued." : finding.Sentence);
     }
 

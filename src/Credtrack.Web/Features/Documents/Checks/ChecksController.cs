@@ -8,7 +8,7 @@ namespace Credtrack.Web.Features.Documents.Checks;
 [Route("documents/checks")]
 [AllowAnonymous]
 [EnableRateLimiting(RateLimits.Checks)]
-public sealed class ChecksController(CredtrackDb db, SealingCertificate certificate, TimeProvider clock) : Controller
+public sealed class ChecksController(CredtrackDb db, SealTrust trust, TimeProvider clock) : Controller
 {
     [HttpGet("")]
     public async Task<IActionResult> Index(string? code) => View("Index", await CheckPage.Load(db, new CheckForm { Code = code },
@@ -27,6 +27,6 @@ public sealed class ChecksController(CredtrackDb db, SealingCertificate certific
         if (form.File is null) return await CheckAnswer.OfCode(db, DocumentCode.Read(form.Code)!);
         using var bytes = new MemoryStream();
         await form.File.CopyToAsync(bytes);
-        return await CheckAnswer.OfFile(db, bytes.ToArray(), certificate);
+        return await CheckAnswer.OfFile(db, bytes.ToArray(), trust);
     }
 }

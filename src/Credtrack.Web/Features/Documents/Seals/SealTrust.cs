@@ -46,6 +46,13 @@ public sealed class SealTrust
         return chain.Build(signer) ? null : string.Join(", ", chain.ChainStatus.Select(s => s.Status));
     }
 
+    /// <summary>Whether nothing speaks against a certificate but the time.</summary>
+    public bool IsOutOfTime(X509Certificate2 signer, DateTime at)
+    {
+        using var chain = Chain(at);
+        return !chain.Build(signer) && chain.ChainStatus.All(s => s.Status == X509ChainStatusFlags.NotTimeValid);
+    }
+
     private X509Certificate2Collection Built(X509Certificate2 signer)
     {
         using var chain = Chain(signer.NotBefore);

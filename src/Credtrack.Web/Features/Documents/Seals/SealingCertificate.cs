@@ -1,3 +1,4 @@
+using System.Globalization;
 using System.Security.Cryptography;
 using System.Security.Cryptography.X509Certificates;
 
@@ -26,7 +27,7 @@ public sealed class SealingCertificate : IDisposable
     /// <param name="password">The password of the file, or null if it has none.</param>
     /// <param name="formerPem">The text of a PEM file with the certificates before this one and their roots, whose seals stay good; or null.</param>
     /// <param name="site">The name that a new certificate carries.</param>
-    /// <exception cref="InvalidOperationException">The file is open to everybody, cannot be read, or is no certificate for documents today.</exception>
+    /// <exception cref="InvalidOperationException">The file is open to everybody, cannot be read, or is no certificate for documents. One that is out of its time seals nothing, but is no fault.</exception>
     public static SealingCertificate LoadOrMake(string path, string? password, string? formerPem, string site, TimeProvider clock, ILogger log)
     {
         var now = clock.UtcNow();
@@ -40,10 +41,16 @@ public sealed class SealingCertificate : IDisposable
         var trust = new SealTrust([.. read, .. former?.Certificates ?? []]);
         if (!trust.Signers.Contains(signer)) throw Settings.Wrong($"the certificate of {path} is one for certificates, not for documents.");
         if (signer.GetKeyAlgorithm() != Rsa) throw Settings.Wrong($"the key of {path} is not an RSA key.");
-        return trust.WhyNot(signer, now) is { } reason
-            ? throw Settings.Wrong($"the certificate of {path} cannot seal documents now: {reason}.")
-            : new SealingCertificate(signer, trust);
+        if (trust.WhyNot(signer, now) is { } reason && !trust.IsOutOfTime(signer, now)) throw Settings.Wrong($"the certificate of {path} cannot seal documents now: {reason}.");
+        if (trust.IsOutOfTime(signer, now)) Log.SealOutOfTime(log, (int)(now - signer.NotAfter.ToUniversalTime()).TotalDays);
+        return new SealingCertificate(signer, trust);
     }
+
+    /// <summary>Why nothing can be sealed at an instant, in words, or null. What was sealed while the certificate was good stays good.</summary>
+    public string? WhyNot(DateTime at) =>
+          Trust.WhyNot(Signer, at) is null         ? null
+        : at > Signer.NotAfter.ToUniversalTime()   ? string.Create(CultureInfo.InvariantCulture, $"No paper can be sealed: the certificate of the seal was good until {Signer.NotAfter.ToUniversalTime():yyyy-MM-dd}. Whoever runs this site has to bring a new one.")
+        :                                            "No paper can be sealed: the certificate of the seal is not good at this time. Whoever runs this site has to look at it.";
 
     /// <summary>That of this site, by its settings and under its name.</summary>
     public static SealingCertificate OfSite(IServiceProvider services)

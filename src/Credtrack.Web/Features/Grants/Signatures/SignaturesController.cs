@@ -1,3 +1,4 @@
+using Credtrack.Core;
 using Credtrack.Web.Features.Documents;
 using Microsoft.AspNetCore.Identity;
 
@@ -9,18 +10,19 @@ public sealed class SignaturesController(CredtrackDb db, Me me, TimeProvider clo
 {
     [HttpGet("new")]
     public async Task<IActionResult> New(Guid grantId) =>
-        await SignaturePage.Load(db, me, grantId, new SignatureForm(), me.Today(clock)) is { } page ? View("New", page) : NotFound();
+        await SignaturePage.Load(db, me, grantId, new SignatureForm(), issuing, clock.UtcNow()) is { } page ? View("New", page) : NotFound();
 
     [HttpPost("")]
     public async Task<IActionResult> Create(Guid grantId, SignatureForm form, [FromServices] UserManager<Account> accounts)
     {
         if (await db.GrantsVisibleTo(me.Person).Find(grantId) is not { } grant) return NotFound();
         var (version, shown) = (form.Version, form.Digest);
-        var page = (await SignaturePage.Load(db, me, grantId, form, me.Today(clock)))!;
+        var page = (await SignaturePage.Load(db, me, grantId, form, issuing, clock.UtcNow()))!;
         if (shown != page.Statement.Digest) return this.Moved("New", page with { HasMoved = true });
-        if (page.WhyNot is null) await form.Judge(page, accounts, me.Person, ModelState);
+        RuleBroken.If(page.WhyNot);
+        await form.Judge(page, accounts, me.Person, ModelState);
         if (ModelState.IsValid && issuing.WhyNot(page.Statement, me.Person, form.GapReason, me.Site, clock.UtcNow()) is { } why) ModelState.AddModelError("", why);
-        if (page.WhyNot is null && !ModelState.IsValid) return this.Again("New", page);
+        if (!ModelState.IsValid) return this.Again("New", page);
         db.Seen(grant, version);
         grant.Sign(me.Person, page.Statement, form.Meaning ?? default, form.GapReason, clock.UtcNow());
         issuing.Issue(grant, page.Statement, me.Person, me.Site);

@@ -34,6 +34,7 @@ public sealed class DemoSite(CredtrackDb db, PictureFiles pictures, Func<Issuing
         director.Join(director, emergency, MembershipKind.Director, start);
         Member("Dr Caspian Rothermere-Vale", medicine, MembershipKind.Director, start);
         Member("Nuala Fitzmaurice-Hart", emergency, MembershipKind.Coordinator, start);
+        Member("Dr Leontyne Ashgrove-Mbeki", emergency, MembershipKind.Chair, start);
         Member("Bram Oyelaran", medicine, MembershipKind.Coordinator, start);
         foreach (var name in DemoNames.EmergencyReaders) Member(name, emergency, MembershipKind.Reader, start);
         foreach (var name in DemoNames.MedicineReaders) Member(name, medicine, MembershipKind.Reader, start);

@@ -63,7 +63,9 @@ public sealed class ChecksTests(RunningSite site) : IClassFixture<RunningSite>
         using var stranger = own.Visitor();
         for (var n = 0; n < RateLimits.ChecksAMinute; n++) await stranger.Opens($"/documents/checks?code={DocumentCode.New()}");
         Assert.Equal(HttpStatusCode.OK, stranger.Status);
-        Assert.Equal(HttpStatusCode.TooManyRequests, (await stranger.Opens("/documents/checks")).Status);
+        Assert.Equal(HttpStatusCode.TooManyRequests, (await stranger.Opens($"/documents/checks?code={DocumentCode.New()}")).Status);
+        Assert.Equal(HttpStatusCode.OK, (await stranger.Opens("/documents/checks?code=")).Status);
+        Assert.Equal(HttpStatusCode.TooManyRequests, (await stranger.Fills("Number under the square code", DocumentCode.New()).Presses("Check it")).Status);
     }
 
     [Fact]

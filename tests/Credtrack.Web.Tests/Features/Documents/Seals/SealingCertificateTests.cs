@@ -85,6 +85,20 @@ public sealed class SealingCertificateTests
         Assert.Equal(6, SealTrust.Of(former)!.Certificates.Count);
     }
 
+    [Fact]
+    public void One_that_is_out_of_its_time_is_loaded_with_a_warning_and_seals_nothing_and_its_seals_stay_good()
+    {
+        var (path, log, late) = (SealPress.NewPath(), new Lines(), new SiteClock());
+        byte[] pressed;
+        using (var young = SealPress.Open(path)) pressed = SealPress.Press(certificate: young);
+        late.Now = late.Now.AddYears(6);
+        using var old = SealPress.Open(path, clock: late, log: log);
+        Assert.StartsWith("The sealing certificate is out of its time: it ended 367 days ago", Assert.Single(log.Written), StringComparison.Ordinal);
+        Assert.Equal("No paper can be sealed: the certificate of the seal was good until 2031-02-28. Whoever runs this site has to bring a new one.", old.WhyNot(late.Now.UtcDateTime));
+        Assert.Null(old.WhyNot(SealPress.Now));
+        Assert.True(SealPress.Check(pressed, old).IsGood);
+    }
+
     [Theory]
     [InlineData("is not an RSA key.")]
     [InlineData("needs exactly one certificate with its private key.")]
