@@ -1,5 +1,7 @@
 using Credtrack.Web.Plumbing.Mail;
 using Microsoft.AspNetCore.DataProtection;
+using Microsoft.AspNetCore.DataProtection.KeyManagement;
+using Microsoft.AspNetCore.DataProtection.Repositories;
 using Microsoft.AspNetCore.Identity;
 
 namespace Credtrack.Web.Plumbing;
@@ -15,8 +17,13 @@ public static class Accounts
         services.AddAuthentication(IdentityConstants.ApplicationScheme).AddIdentityCookies(cookies => cookies.ApplicationCookie!.Configure(SignInCookie.Configure(settings)));
         services.AddIdentityCore<Account>().AddEntityFrameworkStores<CredtrackDb>().AddSignInManager();
         services.Configure<PasswordHasherOptions>(options => options.IterationCount = HashRounds);
-        SecretFile.Folder(settings.KeyFolder);
-        services.AddDataProtection().SetApplicationName("Credtrack").PersistKeysToFileSystem(new DirectoryInfo(settings.KeyFolder));
+        services.AddDataProtection().SetApplicationName("Credtrack");
+        // Made on the first use, so that a command which needs no keys leaves no folder behind.
+        services.AddOptions<KeyManagementOptions>().Configure<ILoggerFactory>((keys, log) =>
+        {
+            SecretFile.Folder(settings.KeyFolder);
+            keys.XmlRepository = new FileSystemXmlRepository(new DirectoryInfo(settings.KeyFolder), log);
+        });
         services.AddSingleton<PasswordPace>().AddSingleton<KnownDevice>().AddSingleton(settings.Mail);
         if (settings.Mail.Host is null) services.AddSingleton<IPost, FolderPost>();
         else services.AddSingleton<IPost, ServerPost>();

@@ -6,7 +6,7 @@ namespace Credtrack.Web.Tests.Features;
 public sealed class SmallPagesTests(RunningSite site) : IClassFixture<RunningSite>
 {
     [Theory] // {0} a proposed grant, {1} one that stands, {2} a trainee, {3} the programme, {4} a waiting scan, {5} the rulebook, {6} the code of a paper
-    [InlineData("/sign-in", 1)]
+    [InlineData("/sign-in", 2)]
     [InlineData("/documents/checks", 1)]
     [InlineData("/documents/checks?code={6}", 2)]
     [InlineData("/rulebooks/{5}", 4)]

@@ -43,11 +43,11 @@ public sealed partial class HostileTextLaws(RunningSite site) : IClassFixture<Ru
         Assert.True(shown >= 15, $"hostile text came out as text on {shown} pages only");
     }
 
-    /// <summary>What names a patient, as clinicians type it; invented examples, in a file of their own beside this one.</summary>
+    /// <summary>What names a patient, as clinicians type it; invented examples, in a file of their own beside this one. A few together, as they fit into any field.</summary>
     private static string[] Identifying()
     {
         using var file = JsonDocument.Parse(File.ReadAllText(Path.Combine(Sources.Root, "tests/Credtrack.Web.Tests/Laws/phi-strings.json")));
-        return [.. file.RootElement.GetProperty("pos").EnumerateArray().Select(pair => pair[0].GetString()!)];
+        return [.. file.RootElement.GetProperty("pos").EnumerateArray().Select(pair => pair[0].GetString()!).Chunk(4).Select(few => string.Join("; ", few))];
     }
 
     /// <summary>Goes to every page that can be reached, the first few of each shape, and tells on how many of them hostile words stood.</summary>
@@ -81,11 +81,11 @@ public sealed partial class HostileTextLaws(RunningSite site) : IClassFixture<Ru
         var hasText = button.Form.QuerySelectorAll("textarea, input[type=text]").Length > 0;
         foreach (var text in hasText ? texts : texts[..1])
         {
-            await visitor.Opens(url);
+            if (visitor.Status != HttpStatusCode.UnprocessableEntity) await visitor.Opens(url); // else the form is there again
             if (Buttons(visitor).FirstOrDefault(b => b.TextContent.Trim() == words && $"{Shape(b.Form!.Action)} {words}" == form) is not { } again) return;
             Fill(again.Form!, text);
             await visitor.Presses(again);
-            Assert.True(visitor.Status is HttpStatusCode.OK or HttpStatusCode.Conflict or HttpStatusCode.UnprocessableEntity or HttpStatusCode.NotFound or HttpStatusCode.Gone or HttpStatusCode.RequestEntityTooLarge, $"{form} with “{text[..Math.Min(40, text.Length)]}”: {visitor.Status}");
+            Assert.True(visitor.Status is HttpStatusCode.OK or HttpStatusCode.Conflict or HttpStatusCode.UnprocessableEntity or HttpStatusCode.NotFound or HttpStatusCode.Gone or HttpStatusCode.RequestEntityTooLarge or HttpStatusCode.TooManyRequests, $"{form} with “{text[..Math.Min(40, text.Length)]}”: {visitor.Status}");
             if (IsPage(visitor)) Harmless(visitor);
         }
     }

@@ -82,7 +82,7 @@ public sealed class EditTests(RunningSite site) : IClassFixture<RunningSite>
         const string markup = "<script>alert('x')</script> & \"quoted\" {{7*7}}";
         using var coordinator = await world.Edits("ocular");
         await coordinator.Fills("Question 1", $"{markup}?").Fills("View 1", markup).Fills("Note", "turned \u202e here").Presses(Cataloguing.Keep);
-        Assert.Equal(["Write it in one line, without control characters."], coordinator.Faults());
+        Assert.Equal(["This text holds a character that cannot be seen (U+202E). Type it anew here instead of pasting it."], coordinator.Faults());
         await coordinator.Fills("Note", markup).Presses(Cataloguing.Keep);
         Assert.Equal(HttpStatusCode.OK, coordinator.Status);
         using var trainee = await world.As(world.Trainee);

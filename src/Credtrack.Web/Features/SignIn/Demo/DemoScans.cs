@@ -39,7 +39,7 @@ internal sealed class DemoScans(CredtrackDb db, PictureFiles pictures, IReadOnly
 
     private IEnumerable<Scan> Year(Person trainee, Programme programme, double pace)
     {
-        var mix = programme == people[0].Memberships[0].Programme ? Emergency : Medicine;
+        var mix = programme == people.SelectMany(p => p.Memberships).First().Programme ? Emergency : Medicine;
         var begun = trainee.Memberships.Single(m => m.Kind == MembershipKind.Trainee).FirstDay.ToDateTime(new TimeOnly(8, 0), DateTimeKind.Utc);
         var first = begun > now.AddYears(-1) ? begun : now.AddYears(-1);
         Scan? last = null;

@@ -116,7 +116,7 @@ public sealed class RemovalsTests(RunningSite site) : IClassFixture<RunningSite>
     private async Task<Scan> Sent(World world, byte shade)
     {
         using var trainee = await (await world.Starts()).Answers("No", Logging.OfCardiac).Attaches(Logging.Attach, Stills.Png(shade)).Ticks(Logging.Confirm).Presses(Logging.Submit);
-        return (await site.ScansOf(world.Trainee))[^1];
+        return (await site.Kept(Guid.Parse(trainee.Url.Split('/')[^1])))!;
     }
 
     private static async Task<Visitor> Form(World world, Person person, Scan scan) => await (await world.As(person)).Opens($"/scans/{scan.Id}/pictures/1/removals/new");
