@@ -60,6 +60,7 @@ public sealed class FirstStartJourneyTests(Demonstration browser)
         await cora.Chooses("Shown to me once, to hand over");
         await cora.Presses("Show what it will do");
         await cora.Presses("Admit 3 lines now");
+        await Expect(cora.Page.Locator("code.key")).ToHaveCountAsync(Listed.Length);
         var links = await cora.Page.Locator("code.key").AllInnerTextsAsync();
         return [.. Listed.Zip(links, (address, link) => (address, site.Here(link)))];
     }

@@ -25,6 +25,10 @@ public static partial class FreeText
     public static string? WhyNotKeep(string? text) =>
           text is null          ? null
         : text.Length > Longest ? "Keep it within 1,000 characters."
+        : WhyNotName(text);
+
+    /// <summary>The same of a text whose length is bounded elsewhere.</summary>
+    public static string? WhyNotName(string? text) => text is null ? null
         : Identifiers.Where(i => i.Form.IsMatch(text)).Select(i => $"This looks like {i.Kind}. Take it out: nothing here may identify a patient.").FirstOrDefault();
 
     public static string? WhyNotReason(string? text) => string.IsNullOrWhiteSpace(text) ? "Give the reason." : WhyNotKeep(text);

@@ -1,5 +1,6 @@
 using Credtrack.Core.Catalogue;
 using Credtrack.Core.People;
+using Credtrack.Core.Plumbing;
 
 namespace Credtrack.Core.Scans;
 
@@ -26,6 +27,7 @@ public sealed record ScanEntry(
         if (Supervisor?.Id == traineeId) yield return (nameof(Supervisor), "Nobody supervises themselves.");
         else if (Supervisor is not null && !Supervisor.Is(MembershipKind.Reader, programmeId)) yield return (nameof(Supervisor), "Choose a reader of this programme.");
         if (Note?.Length > LongestNote) yield return (nameof(Note), $"Keep the note within {LongestNote} characters.");
+        if (FreeText.WhyNotName(Note) is { } named) yield return (nameof(Note), named);
         foreach (var fault in Settings.Faults()) yield return fault;
     }
 }

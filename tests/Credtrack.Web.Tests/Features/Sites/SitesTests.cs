@@ -22,6 +22,8 @@ public sealed class SitesTests : IClassFixture<SitesTests.ItsOwnSite>
         await ada.Fills("Whom outsiders ask", "Credentialing office, 01 555 0100").Fills("A reading is late after days", "10").Presses("Save");
         Assert.Equal(HttpStatusCode.OK, ada.Status);
         Assert.Contains("changed the site: contact from none to Credentialing office, 01 555 0100; days until a reading is late from 7 to 10.", ada.Text, StringComparison.Ordinal);
+        using var stranger = await site.Visitor().Opens("/documents/checks");
+        Assert.Contains("Questions about what it says: Test site, Credentialing office, 01 555 0100.", stranger.Text, StringComparison.Ordinal);
         await ada.Fills("Whom outsiders ask", "").Fills("A reading is late after days", "7").Presses("Save");
         Assert.Null((await site.Ask(db => db.Sites.SingleAsync())).Contact);
     }

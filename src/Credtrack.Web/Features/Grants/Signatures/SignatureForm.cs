@@ -26,12 +26,11 @@ public sealed class SignatureForm
     public string? Password { get; set; }
 
     /// <summary>What only the page and the account can judge: a gap asks for its reason, and the password must be the signer's.</summary>
-    public async Task Judge(SignaturePage page, UserManager<Account> accounts, Person signer, ModelStateDictionary faults)
+    public async Task Judge(SignaturePage page, UserManager<Account> accounts, PasswordPace pace, Person signer, ModelStateDictionary faults)
     {
         if (page.Statement.Gaps.Count > 0 && string.IsNullOrWhiteSpace(GapReason))
             faults.AddModelError("Form.GapReason", "Not everything is met: say why you sign all the same. The reason is printed on the paper.");
         if (string.IsNullOrEmpty(Password)) return;
-        var account = await accounts.FindByIdAsync(signer.Id.ToString());
-        if (account is null || !await accounts.CheckPasswordAsync(account, Password)) faults.AddModelError("Form.Password", "This is not your password. Nothing was signed.");
+        if (await pace.Judge(accounts, (await accounts.FindByIdAsync(signer.Id.ToString()))!, Password) is { } why) faults.AddModelError("Form.Password", $"{why} Nothing was signed.");
     }
 }

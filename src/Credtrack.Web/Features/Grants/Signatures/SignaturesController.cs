@@ -13,14 +13,14 @@ public sealed class SignaturesController(CredtrackDb db, Me me, TimeProvider clo
         await SignaturePage.Load(db, me, grantId, new SignatureForm(), issuing, clock.UtcNow()) is { } page ? View("New", page) : NotFound();
 
     [HttpPost("")]
-    public async Task<IActionResult> Create(Guid grantId, SignatureForm form, [FromServices] UserManager<Account> accounts)
+    public async Task<IActionResult> Create(Guid grantId, SignatureForm form, [FromServices] UserManager<Account> accounts, [FromServices] PasswordPace pace)
     {
         if (await db.GrantsVisibleTo(me.Person).Find(grantId) is not { } grant) return NotFound();
         var (version, shown) = (form.Version, form.Digest);
         var page = (await SignaturePage.Load(db, me, grantId, form, issuing, clock.UtcNow()))!;
         if (shown != page.Statement.Digest) return this.Moved("New", page with { HasMoved = true });
         RuleBroken.If(page.WhyNot);
-        await form.Judge(page, accounts, me.Person, ModelState);
+        await form.Judge(page, accounts, pace, me.Person, ModelState);
         if (ModelState.IsValid && issuing.WhyNot(page.Statement, me.Person, form.GapReason, me.Site, clock.UtcNow()) is { } why) ModelState.AddModelError("", why);
         if (!ModelState.IsValid) return this.Again("New", page);
         db.Seen(grant, version);

@@ -8,7 +8,7 @@ public sealed class ReturnForm
     public int Version { get; set; }
 
     [Display(Name = "What is missing?"), Required(ErrorMessage = "Say what is missing, so that the trainee can mend it.")]
-    [StringLength(1000, ErrorMessage = "Keep it within 1,000 characters.")]
+    [NamesNobody]
     public string? Missing { get; set; }
 }
 

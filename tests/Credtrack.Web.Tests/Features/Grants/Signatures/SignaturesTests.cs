@@ -111,6 +111,22 @@ public sealed class SignaturesTests(RunningSite site) : IClassFixture<RunningSit
     }
 
     [Fact]
+    public async Task Who_guesses_the_password_at_an_open_screen_soon_has_to_wait()
+    {
+        var world = await site.NewWorld();
+        var id = await world.Proposed();
+        for (var wrong = 0; wrong < 10; wrong++) Assert.Contains("This is not your password. Nothing was signed.", await Guess($"wrong {wrong}"), StringComparison.Ordinal);
+        Assert.Contains("Too many wrong passwords were tried. Wait 2 seconds, then try again. Nothing was signed.", await Guess(World.Password), StringComparison.Ordinal);
+        Assert.False(await site.Ask(db => db.Set<Signature>().AnyAsync(s => s.GrantId == id)));
+
+        async Task<string> Guess(string password)
+        {
+            using var director = await world.AtTheDesk(world.Director, id);
+            return (await director.Means().Fills("Why you sign although not everything is met", "Trained elsewhere.").Fills("Your password, again", password).Presses("Sign and seal")).Text;
+        }
+    }
+
+    [Fact]
     public async Task A_forged_digest_signs_nothing()
     {
         var world = await site.NewWorld();
