@@ -40,6 +40,7 @@ public sealed class Demonstration : WebApplicationFactory<Program>, IAsyncLifeti
         builder.UseSetting("ConnectionStrings:Credtrack", $"Data Source={Path.Combine(folder.FullName, "credtrack.db")};Pooling=False");
         builder.UseSetting("Pictures:Folder", Path.Combine(folder.FullName, "pictures"));
         builder.UseSetting("Seal:Certificate", Path.Combine(folder.FullName, "seal", "seal.pfx"));
+        builder.UseSetting("Jobs:On", "false");
         builder.UseSetting("Keys:Folder", Path.Combine(folder.FullName, "keys")).UseSetting("Mail:Folder", Path.Combine(folder.FullName, "mail"));
         builder.ConfigureLogging(log => log.ClearProviders());
     }

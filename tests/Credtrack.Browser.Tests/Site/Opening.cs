@@ -34,6 +34,7 @@ public sealed class Opening : WebApplicationFactory<Program>
         builder.UseEnvironment("Production").UseSetting("Demo:On", "false");
         builder.UseSetting("ConnectionStrings:Credtrack", $"Data Source={Path.Combine(folder.FullName, "credtrack.db")};Pooling=False");
         foreach (var place in new[] { "Pictures:Folder", "Mail:Folder", "Keys:Folder" }) builder.UseSetting(place, Path.Combine(folder.FullName, place[..4]));
+        builder.UseSetting("Jobs:On", "false");
         builder.UseSetting("Seal:Certificate", Path.Combine(folder.FullName, "seal", "seal.pfx"));
         builder.ConfigureLogging(log => log.ClearProviders());
     }
