@@ -13,7 +13,7 @@ public sealed record GrantsPage(IReadOnlyList<GrantLine> Lines, int Page, int Al
 
     public static async Task<GrantsPage> Load(CredtrackDb db, Me me, int page)
     {
-        var (visible, led) = (db.GrantsVisibleTo(me.Person).AsNoTracking(), me.Person.ProgrammesAs(MembershipKind.Director).ToList());
+        var visible = db.GrantsVisibleTo(me.Person).AsNoTracking();
         // In the order of the page's sections.
         var rows = await visible.OrderBy(g => g.Ending != null ? 2 : g.Decline != null ? 3 : g.Signatures.Any() ? 1 : 0).ThenByDescending(g => g.ProposedAt).ThenBy(g => g.Id).Skip((page - 1) * Size).Take(Size).Select(g => new
         {
@@ -26,7 +26,7 @@ public sealed record GrantsPage(IReadOnlyList<GrantLine> Lines, int Page, int Al
             r.Grant.Ending?.At ?? r.Grant.Decline?.At ?? r.Grant.Signature?.At ?? r.Grant.ProposedAt,
             r.Grant.Ending?.By.Name ?? r.Grant.Decline?.By.Name ?? r.Grant.Signature?.Signer.Name ?? r.ProposedBy, r.DocumentId, r.Grant.WhyNotSign(me.Person)));
         return new([.. lines], page, await visible.CountAsync(),
-            await visible.CountAsync(g => g.IsOpen == true && !g.Signatures.Any() && g.HolderId != me.Person.Id && led.Contains(g.ProgrammeId)),
+            await db.GrantsToSignBy(me.Person).CountAsync(),
             await visible.CountAsync(g => g.IsOpen == true && g.Signatures.Any()));
     }
 }

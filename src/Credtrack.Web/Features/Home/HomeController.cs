@@ -4,5 +4,5 @@ namespace Credtrack.Web.Features.Home;
 public sealed class HomeController(CredtrackDb db, Me me, TimeProvider clock) : Controller
 {
     [HttpGet("")]
-    public async Task<IActionResult> Index() => View(await HomePage.Load(db, me, me.Today(clock)));
+    public async Task<IActionResult> Index() => View(await HomePage.Load(db, me, clock.UtcNow()));
 }

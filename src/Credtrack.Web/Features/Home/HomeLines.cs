@@ -1,4 +1,3 @@
-using Credtrack.Core.Scans;
 using Credtrack.Web.Features.FollowUps;
 
 namespace Credtrack.Web.Features.Home;

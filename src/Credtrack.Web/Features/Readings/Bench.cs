@@ -8,6 +8,11 @@ public sealed record Bench(int Position, int Length, DateTime? OldestSince, Guid
     /// <summary>More than anybody reads in a row; those after it come up as the first ones are read.</summary>
     private const int Most = 1000;
 
+    /// <summary>Since when each of them waits, in order.</summary>
+    public IReadOnlyList<DateTime> Waits { get; private init; } = [];
+
+    public int Before(DateTime at) => Waits.Count(since => since < at);
+
     /// <summary>For a scan that is looked at away from the bench.</summary>
     public static Bench None { get; } = new(0, 0, null, null);
 
@@ -18,6 +23,6 @@ public sealed record Bench(int Position, int Length, DateTime? OldestSince, Guid
             .OrderBy(w => w.Since).ThenBy(w => w.Id).Take(Most).ToListAsync();
         var place = at is null ? -1 : queue.FindIndex(w => w.Id == at.Id);
         var next = queue.Skip(place + 1).Concat(queue).FirstOrDefault(w => w.Id != at?.Id);
-        return new(place + 1, queue.Count, queue.FirstOrDefault()?.Since, next?.Id);
+        return new(place + 1, queue.Count, queue.FirstOrDefault()?.Since, next?.Id) { Waits = [.. queue.Select(w => w.Since)] };
     }
 }

@@ -46,14 +46,17 @@ public sealed record StandingLine(string Code, string Name, Depth? Depth, Applic
 
     public static StandingLine Of(Standing standing, ApplicationStanding application, string name)
     {
-        var required = application.Requirements.Select(r => r.Asked).OfType<Count>().Where(c => c.Where is null).Select(c => (int)c.Min).DefaultIfEmpty(-1).Max();
+        var required = RequiredBy(application.Rules);
         var capped = standing.Findings.Count(f => f.Application == application.Code && f.Cap is not null);
-        var depth = required < 0 ? null : new Depth(application.Code, name, required, application.Counted, application.Pending, capped, application.Met);
+        var depth = required is not { } least ? null : new Depth(application.Code, name, least, application.Counted, application.Pending, capped, application.Met);
         return new(application.Code, name, depth, application, application.Excluded.Values.Sum());
     }
 
     public static StandingLine? Of(Standing standing, string code, string name) =>
         standing.Applications.FirstOrDefault(a => a.Code == code) is { } application ? Of(standing, application, name) : null;
+
+    /// <summary>The plain count that is asked; null where none is.</summary>
+    public static int? RequiredBy(ApplicationRules rules) => rules.Require.OfType<Count>().Where(c => c.Where is null).Max(c => (int?)c.Min);
 
     private static string Lacking(RequirementStanding requirement) => requirement.Missing is not null ? $"{requirement.Lacks} missing" : requirement.Lacks!;
 }

@@ -60,6 +60,6 @@ public sealed record StandingPage(
         };
     }
 
-    // A year that no calendar of scans has would only make the arithmetic of days overflow.
-    private static DateOnly Within(DateOnly day) => day.Year < 1950 ? new(1950, 1, 1) : day.Year > 2200 ? new(2200, 12, 31) : day;
+    /// <summary>A year that no calendar of scans has would only make the arithmetic of days overflow.</summary>
+    public static DateOnly Within(DateOnly day) => day.Year < 1950 ? new(1950, 1, 1) : day.Year > 2200 ? new(2200, 12, 31) : day;
 }

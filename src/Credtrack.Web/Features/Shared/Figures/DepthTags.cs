@@ -56,3 +56,16 @@ public sealed class DepthLegend : TagHelper
         (SwatchKind.Ticks, $"every {unit.Tick} scans, longer every {unit.LongTick}"),
     ];
 }
+
+/// <summary>&lt;depth-cell for="@depth" /&gt;: for the cohort sheet, with its words under it.</summary>
+[HtmlTargetElement("depth-cell", TagStructure = TagStructure.WithoutEndTag)]
+public sealed class DepthCell : TagHelper
+{
+    public required Depth For { get; set; }
+
+    public override void Process(TagHelperContext context, TagHelperOutput output)
+    {
+        output.TagName = null;
+        output.Content.SetHtmlContent(CellDrawing.Of(For));
+    }
+}

@@ -16,6 +16,7 @@ public sealed class DepthDrawingTests
         {
             "column" => DepthDrawing.Column(depth, unit),
             "row" => DepthDrawing.Row(depth, unit),
+            "cell" => CellDrawing.Of(depth),
             _ => ShortDrawing.Of(depth),
         });
     }
@@ -29,7 +30,7 @@ public sealed class DepthDrawingTests
             var depth = Any(chance);
             // A chart may be deeper than this one of its columns.
             var unit = DepthUnit.For(Math.Max(depth.Required, chance.Next(2) * chance.Next(601)));
-            foreach (var svg in new[] { DepthDrawing.Column(depth, unit), DepthDrawing.Row(depth, unit), ShortDrawing.Of(depth) })
+            foreach (var svg in new[] { DepthDrawing.Column(depth, unit), DepthDrawing.Row(depth, unit), ShortDrawing.Of(depth), CellDrawing.Of(depth) })
             {
                 var canvas = Canvas.Of(svg);
                 var outside = canvas.Places.Where(p => p.X < 0 || p.Y < 0 || p.X > canvas.Width || p.Y > canvas.Height).ToList();
