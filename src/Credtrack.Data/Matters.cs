@@ -14,6 +14,11 @@ public static class Matters
     public static IQueryable<Scan> WaitingSinceBefore(this IQueryable<Scan> scans, DateTime before) =>
         scans.Where(s => s.Submissions.Any(x => x.Return == null && x.At < before));
 
+    /// <summary>Those in which something has waited since before an instant, and of which this person has not been reminded in this period.</summary>
+    public static IQueryable<Guid> ProgrammesToRemindOf(this CredtrackDb db, ReminderKind kind, Person person, DateTime before, string period) =>
+        db.MatterOf(kind, person).WaitingSinceBefore(before).Select(s => s.ProgrammeId).Distinct()
+            .Where(id => !db.Reminders.Any(r => r.PersonId == person.Id && r.Kind == kind && r.SubjectId == id && r.Period == period));
+
     /// <summary>A person's reminders, each with whether its matter still waits.</summary>
     public static IQueryable<KnownReminder> RemindersOf(this CredtrackDb db, Person person)
     {

@@ -36,12 +36,12 @@ public sealed class SqlServerTests : IDisposable
     [Fact]
     public void What_a_person_may_load_can_be_asked_for()
     {
-        IQueryable<object>[] asked =
+        IQueryable[] asked =
         [
             db.ScansVisibleTo(person), db.ScansOverseenBy(person), db.ScansToConfirmBy(person), db.FollowUpsVisibleTo(person), db.ScansWaitingFor(person), db.ScansWaitingUnder(person),
             db.TraineesVisibleTo(person), db.GrantsVisibleTo(person), db.ProgrammesVisibleTo(person, place), db.RulebooksVisibleTo(person), db.PeopleAtWorkOn(new DateOnly(2026, 3, 1)),
             db.RemindersOf(person).OrderBy(k => k.IsOpen ? 0 : 1).ThenByDescending(k => k.Reminder.MadeAt).Skip(50).Take(50),
-            .. Enum.GetValues<ReminderKind>().Select(kind => db.MatterOf(kind, person).WaitingSinceBefore(Noon)),
+            .. Enum.GetValues<ReminderKind>().Select(kind => db.ProgrammesToRemindOf(kind, person, Noon, "2026-W09")),
         ];
         Assert.All(asked, query => Assert.Empty(Parsed(query.ToQueryString()).Faults));
     }

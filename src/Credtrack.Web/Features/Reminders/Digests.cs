@@ -9,11 +9,14 @@ namespace Credtrack.Web.Features.Reminders;
 
 /// <summary>
 /// Gathers what a person has not been sent into one letter a day, from eight in the morning by the site's clock. It is marked as sent once it was
-/// handed over: cut off in between, the same letter goes out again under the same id; refused, it is tried again at the next run.
+/// handed over: cut off in between, the same letter goes out again under the same id; refused, it is tried again in the next hour.
 /// </summary>
 public sealed class Digests(CredtrackDb db, IPost post, Settings settings, TimeProvider clock)
 {
     private static readonly TimeOnly Hour = new(8, 0);
+
+    // The schedule comes by every quarter of an hour, because zones differ by quarters; by the site's clock this is once an hour.
+    private const int Quarter = 15;
 
     // What could not be sent for so long is told by a newer one, if it still waits.
     private static readonly TimeSpan Stale = TimeSpan.FromDays(14);
@@ -25,7 +28,7 @@ public sealed class Digests(CredtrackDb db, IPost post, Settings settings, TimeP
         var (now, zone) = (clock.UtcNow(), TimeZoneInfo.FindSystemTimeZoneById(site.TimeZone));
         var day = now.DayIn(zone);
         var (midnight, eight) = (LocalTimes.StartOfDay(day, zone), LocalTimes.ToUtc(day.ToDateTime(Hour), zone));
-        if (now < eight) return;
+        if (now < eight || now.In(zone).Minute >= Quarter) return;
         var unsent = Unsent(eight);
         var due = await unsent.Where(r => !db.Reminders.Any(other => other.PersonId == r.PersonId && other.SentAt >= midnight)).Select(r => r.PersonId).Distinct().ToListAsync(stop);
         foreach (var person in due) await Send(person, unsent, site, day, stop);

@@ -19,8 +19,7 @@ public sealed class OverdueReadings(CredtrackDb db, TimeProvider clock)
     private async Task Remind(Person person, ReminderKind kind, Site site, DateOnly day, CancellationToken stop)
     {
         var (before, week) = (Reminder.LateBefore(kind, site, day), Reminder.WeekOf(day));
-        var due = await db.MatterOf(kind, person).WaitingSinceBefore(before).Select(s => s.ProgrammeId).Distinct()
-            .Where(id => !db.Reminders.Any(r => r.PersonId == person.Id && r.Kind == kind && r.SubjectId == id && r.Period == week)).ToListAsync(stop);
+        var due = await db.ProgrammesToRemindOf(kind, person, before, week).ToListAsync(stop);
         foreach (var programme in due)
         {
             db.Add(Reminder.Make(person, kind, programme, week, before, clock.UtcNow()));

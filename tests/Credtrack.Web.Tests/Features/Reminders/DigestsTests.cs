@@ -27,7 +27,7 @@ public sealed class DigestsTests : IClassFixture<PostedSite>
         await site.RunsAt("2026-03-15 07:59");
         Assert.Empty(site.Office.For(address));
         await site.RunsAt("2026-03-15 08:00");
-        foreach (var later in new[] { "08:00", "08:15", "23:45" }) await site.RunsAt($"2026-03-15 {later}");
+        foreach (var later in new[] { "08:00", "09:00", "23:00" }) await site.RunsAt($"2026-03-15 {later}");
         var letter = Assert.Single(site.Office.For(address));
         Assert.Equal("""
             3 scans have waited for your reading for 7 days or longer:
@@ -68,7 +68,7 @@ public sealed class DigestsTests : IClassFixture<PostedSite>
     }
 
     [Fact]
-    public async Task A_letter_that_is_refused_holds_nobody_up_and_is_tried_again()
+    public async Task A_letter_that_is_refused_holds_nobody_up_and_is_tried_again_in_the_next_hour()
     {
         var world = await site.NewWorld();
         var rhea = await world.Another("Rhea", MembershipKind.Reader);
@@ -80,7 +80,9 @@ public sealed class DigestsTests : IClassFixture<PostedSite>
         Assert.Equal((0, 1), (site.Office.For(ruth).Count, site.Office.For(World.AddressOf(rhea)).Count));
         Assert.Null(Assert.Single(await world.Reminders(world.Reader)).SentAt);
         site.Office.Unknown.Remove(user);
-        await site.RunsAt("2026-03-08 08:15");
+        await site.RunsAt("2026-03-08 08:45");
+        Assert.Empty(site.Office.For(ruth));
+        await site.RunsAt("2026-03-08 09:00");
         Assert.Equal((1, 1), (site.Office.For(ruth).Count, site.Office.For(World.AddressOf(rhea)).Count));
         Assert.NotNull(Assert.Single(await world.Reminders(world.Reader)).SentAt);
     }
@@ -107,7 +109,7 @@ public sealed class DigestsTests : IClassFixture<PostedSite>
         var world = await plain.NewWorld();
         await world.Waiting();
         await plain.RunsAt("2026-03-08 07:00");
-        foreach (var quarter in new[] { "08:00", "08:15", "08:30" }) await plain.RunsAt($"2026-03-08 {quarter}");
+        foreach (var quarter in new[] { "08:00", "08:01", "09:00" }) await plain.RunsAt($"2026-03-08 {quarter}");
         Assert.Contains("1 scan has waited for your reading for 7 days or longer:", Letters.To(plain, World.AddressOf(world.Reader)).TextBody, StringComparison.Ordinal);
     }
 
