@@ -11,7 +11,7 @@ public sealed record Progress(IReadOnlyList<ReadyLine> Ready, IReadOnlyList<Coho
 {
     /// <summary>Of how many trainees the standings are taken for this page; what is left out, it says.</summary>
     public const int Most = 240;
-    public const int Listed = 20;
+    public const int Listed = 10;
 
     public static async Task<Progress?> Load(CredtrackDb db, Me me, DateOnly today)
     {

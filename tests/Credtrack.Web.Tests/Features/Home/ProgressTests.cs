@@ -62,12 +62,17 @@ public sealed class ProgressTests(RunningSite site) : IClassFixture<RunningSite>
         await world.Trainee("Stella", "year 1", first: new(2026, 1, 1));
         await world.Trainee("Sven", "year 2", first: new(2026, 1, 20));
         await world.Trainee("Lena", "year 2", new(2026, 1, 1), new(2026, 2, 10));
+        await world.Waiting();
+        await world.Waiting(world.Entry("lung"));
         using var director = await world.As(world.Director);
         Assert.Contains("2 trainees have stalled.", director.Text, StringComparison.Ordinal);
         var here = director.Stalled();
         var sheet = director.Page.QuerySelectorAll("main a").Single(a => a.TextContent == "3 trainees").GetAttribute("href")!;
         Assert.Equal(here, (await director.Opens(sheet)).Stalled());
         Assert.Equal(3, director.Names().Count);
+        await director.Opens("/");
+        await director.Opens(director.Page.QuerySelectorAll("main a").Single(a => a.TextContent == "2 scans").GetAttribute("href")!);
+        Assert.Contains("2 of 2 shown.", director.Text, StringComparison.Ordinal);
     }
 
     [Fact]
