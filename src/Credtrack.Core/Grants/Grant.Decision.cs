@@ -1,5 +1,6 @@
 using System.Security.Cryptography;
 using Credtrack.Core.People;
+using Credtrack.Core.Plumbing;
 
 namespace Credtrack.Core.Grants;
 
@@ -16,7 +17,7 @@ public sealed partial class Grant
     /// <summary>A gap never blocks: people decide. It asks for a reason, which the paper prints.</summary>
     public void Sign(Person by, Statement statement, Meaning meaning, string? gapReason, DateTime at)
     {
-        RuleBroken.If(WhyNotSign(by) ?? (statement.Gaps.Count > 0 && string.IsNullOrWhiteSpace(gapReason) ? "Requirements are not met: say why you sign all the same." : null));
+        RuleBroken.If(WhyNotSign(by) ?? (statement.Gaps.Count > 0 && string.IsNullOrWhiteSpace(gapReason) ? "Requirements are not met: say why you sign all the same." : FreeText.WhyNotKeep(gapReason)));
         var signature = new Signature(this, by, statement, meaning, statement.Gaps.Count > 0 ? SealedText.New(gapReason!) : null, at);
         signatures.Add(signature);
         Record(new GrantSigned(by, at, Privilege, meaning, signature.Digest, signature.Gap?.Seal));
@@ -26,7 +27,7 @@ public sealed partial class Grant
 
     public void TurnDown(Person by, string reason, DateTime at)
     {
-        RuleBroken.If(WhyNotDecline(by));
+        RuleBroken.If(WhyNotDecline(by) ?? FreeText.WhyNotReason(reason));
         var text = SealedText.New(reason);
         (Decline, IsOpen) = (new Decline(this, by, text, at), null);
         Record(new GrantDeclined(by, at, text.Seal));
@@ -41,7 +42,7 @@ public sealed partial class Grant
 
     public void End(Person by, string reason, DateTime at)
     {
-        RuleBroken.If(WhyNotEnd(by));
+        RuleBroken.If(WhyNotEnd(by) ?? FreeText.WhyNotReason(reason));
         var text = SealedText.New(reason);
         (Ending, IsOpen) = (new Ending(this, by, text, at), null);
         Record(new GrantEnded(by, at, text.Seal));

@@ -24,7 +24,7 @@ public static partial class PasswordRule
         return password.Length < Shortest ? $"Use at least {Shortest} characters; a few words with spaces between them are fine."
             : password.Length > Longest ? $"Use at most {Longest} characters."
             : Common.Value.Contains(folded) ? "This password is among those that are tried first. Choose another one."
-            : Repeats(folded) ? "This password repeats itself. Choose one that does not."
+            : Repeats(folded) || Repeats(Ends().Replace(folded, "")) || Repeats(folded[..^1]) ? "This password repeats itself. Choose one that does not."
             : IsRow(folded) ? "These are keys or figures in a row. Choose something less regular."
             : Plain(folded) is { } word && (Common.Value.Contains(word) || Words(around).Contains(word)) ? "This is one well-known word or name with figures around it. Add words of your own."
             : null;

@@ -2,9 +2,13 @@ namespace Credtrack.Core.People;
 
 public sealed partial class Person
 {
+    private const string LastOne = "The last coordinator stays: make somebody else one first, who has chosen a password.";
+
     public string? WhyNotJoin(Programme programme, MembershipTerms terms) =>
           terms.Faults().Select(f => f.Why).FirstOrDefault()
-        ?? (Of(programme, terms.Kind).Any(m => m.Meets(terms.FirstDay, terms.LastDay)) ? $"{Name} is already a {terms.Kind} of {programme.Name}." : null);
+        ?? (Of(programme, terms.Kind).Any(m => m.Meets(terms.FirstDay, terms.LastDay)) ? $"{Name} is already a {terms.Kind} of {programme.Name}."
+        : Of(programme, terms.Kind).Any(m => m.FirstDay == terms.FirstDay) ? $"{Name} began as a {terms.Kind} of {programme.Name} on {terms.FirstDay:O} before; begin on another day."
+        : null);
 
     /// <summary>For whoever sets a programme up. Who is in it already admits others.</summary>
     public void Join(Person by, Programme programme, MembershipTerms terms, DateTime at)
@@ -26,26 +30,41 @@ public sealed partial class Person
         Join(by, programme, terms, at);
     }
 
-    /// <param name="coordinators">everybody who coordinates the programme with no last day</param>
-    public string? WhyNotChange(Person by, Site site, Membership membership, MembershipTerms terms, IEnumerable<Person> coordinators) =>
+    /// <param name="coordinators">who coordinates the programme today, with no last day, and can sign in</param>
+    public string? WhyNotChange(Person by, Site site, Membership membership, MembershipTerms terms, IEnumerable<Person> coordinators, DateOnly today) =>
           WhyNotAdmit(by, site, membership.Programme, membership.Kind)
         ?? terms.Faults().Select(f => f.Why).FirstOrDefault()
         ?? (Of(membership.Programme, membership.Kind).Any(m => m != membership && m.Meets(terms.FirstDay, terms.LastDay)) ? $"{Name} is already a {membership.Kind} of {membership.Programme.Name} on some of these days."
-        : Ends(membership, terms.LastDay) && coordinators.All(c => c.Id == Id) ? "The last coordinator stays: make somebody else one first."
+        : Ends(membership, terms, today) && coordinators.All(c => c.Id == Id) ? LastOne
         : null);
 
-    public void Change(Person by, Site site, Membership membership, MembershipTerms terms, IReadOnlyCollection<Person> coordinators, DateTime at)
+    public void Change(Person by, Site site, Membership membership, MembershipTerms terms, IReadOnlyCollection<Person> coordinators, DateOnly today, DateTime at)
     {
-        RuleBroken.If(WhyNotChange(by, site, membership, terms, coordinators));
+        RuleBroken.If(WhyNotChange(by, site, membership, terms, coordinators, today));
         (string Name, string Was, string Is)[] said =
         [
             ("year group", membership.YearGroup ?? "none", terms.YearGroup ?? "none"), ("first day", $"{membership.FirstDay:O}", $"{terms.FirstDay:O}"),
             ("last day", Spoken(membership.LastDay), Spoken(terms.LastDay)),
         ];
-        if (Ends(membership, terms.LastDay)) membership.Programme.LetGo(by, this, terms.LastDay!.Value, at);
+        if (Ends(membership, terms, today)) membership.Programme.LetGo(by, this, terms.LastDay ?? today, at);
         membership.Take(terms);
         var what = string.Join("; ", said.Where(s => s.Was != s.Is).Select(s => $"{s.Name} from {s.Was} to {s.Is}"));
         if (what.Length > 0) Record(new MembershipChanged(by, at, Name, membership.Kind, membership.Programme.Name, what));
+    }
+
+    public string? WhyNotEnd(Person by, Site site, Membership membership, IEnumerable<Person> coordinators, DateOnly today) =>
+          WhyNotAdmit(by, site, membership.Programme, membership.Kind)
+        ?? (membership.LastDay < today ? "This membership is over."
+        : membership is { Kind: MembershipKind.Coordinator, LastDay: null } && coordinators.All(c => c.Id == Id) ? LastOne
+        : null);
+
+    /// <summary>At once: the last day is yesterday, also of a membership that began today and so covers no day at all; the fact says the moment.</summary>
+    public void End(Person by, Site site, Membership membership, IReadOnlyCollection<Person> coordinators, DateOnly today, DateTime at)
+    {
+        RuleBroken.If(WhyNotEnd(by, site, membership, coordinators, today));
+        if (membership is { Kind: MembershipKind.Coordinator, LastDay: null }) membership.Programme.LetGo(by, this, today.AddDays(-1), at);
+        membership.EndAfter(today.AddDays(-1));
+        Record(new MembershipEnded(by, at, Name, membership.Kind, membership.Programme.Name));
     }
 
     public string? WhyNotLeave(Programme programme, MembershipKind kind) =>
@@ -61,6 +80,7 @@ public sealed partial class Person
     public string? WhyNotBeAway(Programme programme, DateOnly first, DateOnly last) =>
           Of(programme, MembershipKind.Trainee).LastOrDefault() is not { } membership ? $"{Name} is no Trainee of {programme.Name}."
         : first > last ? "A leave ends on or after the day on which it begins."
+        : !membership.Meets(first, last) ? "These days lie outside the membership."
         : membership.Leaves.Any(l => l.TakenBackAt is null && l.FirstDay <= last && first <= l.LastDay) ? $"{Name} is already away on some of these days."
         : null;
 
@@ -94,7 +114,8 @@ public sealed partial class Person
 
     private Membership? Open(Programme programme, MembershipKind kind) => Of(programme, kind).SingleOrDefault(m => m.LastDay is null);
 
-    private static bool Ends(Membership membership, DateOnly? lastDay) => membership is { Kind: MembershipKind.Coordinator, LastDay: null } && lastDay is not null;
+    private static bool Ends(Membership membership, MembershipTerms terms, DateOnly today) =>
+        membership is { Kind: MembershipKind.Coordinator, LastDay: null } && (terms.LastDay is not null || (membership.FirstDay <= today && terms.FirstDay > today));
 
     private static string Spoken(DateOnly? lastDay) => lastDay is { } day ? $"{day:O}" : "none";
 

@@ -1,3 +1,5 @@
+using Credtrack.Core.Plumbing;
+
 namespace Credtrack.Core.People;
 
 /// <summary>What a site says of itself.</summary>
@@ -12,6 +14,8 @@ public sealed record SiteEntry(string Name, string TimeZone, string? Contact, in
     public IEnumerable<(string About, string Why)> Faults()
     {
         if (string.IsNullOrWhiteSpace(Name)) yield return (nameof(Name), "Give the site a name.");
+        else if (TextLine.WhyNot(Name, LongestName) is { } line) yield return (nameof(Name), line);
+        if (Contact is not null && TextLine.WhyNot(Contact, LongestContact) is { } odd) yield return (nameof(Contact), odd);
         if (Site.WhyNotFound(TimeZone) is { } why) yield return (nameof(TimeZone), why);
         if (LateAfterDays is < 1 or > 90) yield return (nameof(LateAfterDays), "Give a number of days from 1 to 90.");
     }
@@ -78,15 +82,16 @@ public sealed class Site : Recorded
         if (!IsAdministeredBy(person)) Add(person, person, at);
     }
 
-    public string? WhyNotDismiss(Person by, Person person) =>
+    /// <param name="signingIn">the administrators who have chosen a password</param>
+    public string? WhyNotDismiss(Person by, Person person, IEnumerable<Guid> signingIn) =>
           WhyNotChange(by)
         ?? (!IsAdministeredBy(person) ? $"{person.Name} is no administrator."
-        : administrators.Count(a => a.EndedAt is null) == 1 ? "The last administrator stays: appoint another one first."
+        : !administrators.Any(a => a.EndedAt is null && a.PersonId != person.Id && signingIn.Contains(a.PersonId)) ? "The last administrator stays: appoint another one first, who has chosen a password."
         : null);
 
-    public void Dismiss(Person by, Person person, DateTime at)
+    public void Dismiss(Person by, Person person, IReadOnlyCollection<Guid> signingIn, DateTime at)
     {
-        RuleBroken.If(WhyNotDismiss(by, person));
+        RuleBroken.If(WhyNotDismiss(by, person, signingIn));
         administrators.Single(a => a.PersonId == person.Id && a.EndedAt is null).End(at);
         Record(new AdministratorDismissed(by, at, person.Name));
     }

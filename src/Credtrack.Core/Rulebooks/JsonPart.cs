@@ -1,5 +1,6 @@
 using System.Text.Json;
 using Credtrack.Core.Measures;
+using Credtrack.Core.Plumbing;
 
 namespace Credtrack.Core.Rulebooks;
 
@@ -10,7 +11,8 @@ internal sealed class JsonPart(JsonElement json, string path, List<Fault> faults
 
     public void Fault(string expected) => faults.Add(new Fault(path, expected));
 
-    public string? Text() => Is(JsonValueKind.String) && json.GetString() is { Length: > 0 } text ? text : Refuse<string>("expected a text that is not empty");
+    public string? Text() => !Is(JsonValueKind.String) || json.GetString() is not { Length: > 0 } text ? Refuse<string>("expected a text that is not empty")
+        : TextLine.WhyNot(text, Rulebook.LongestText) is null ? text : Refuse<string>("expected a text in one line, without control characters and marks that turn its direction");
 
     public bool? YesNo() => json.ValueKind switch
     {

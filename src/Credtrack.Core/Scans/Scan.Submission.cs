@@ -37,6 +37,7 @@ public sealed partial class Scan
     public void Discard(Person by, DateTime at)
     {
         RuleBroken.If(WhyNotDiscard(by));
+        foreach (var picture in ShownPictures.ToList()) Remove(by, picture, at);
         Withdrawal = new Withdrawal(this, by, null, at);
         Record(new DraftDiscarded(by, at));
     }

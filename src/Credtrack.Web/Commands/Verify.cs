@@ -5,7 +5,8 @@ public static class Verify
 {
     public const string Usage = "usage: verify";
     public const string NotSeen = "Not seen by this check: an end cut off a chain, a whole chain taken away, and a chain sealed anew after a change. "
-        + "They show only against a root of all chains kept outside this machine, which this version does not write yet.";
+        + "They show only against a root of all chains kept outside this machine, which this version does not write yet. "
+        + "Rows beside the ledger are compared for what was signed, declined, ended and issued; of scans, readings, follow-ups and people the ledger alone is checked.";
 
     /// <param name="args">What follows the word verify: nothing.</param>
     /// <param name="output">One line for each bad place, the first one first, and for each row that the ledger speaks of otherwise; then how many chains are whole and what is not seen.</param>

@@ -13,9 +13,9 @@ public sealed class KnownDevice(IDataProtectionProvider protection)
 
     private readonly IDataProtector seal = protection.CreateProtector("device");
 
-    /// <summary>By what the tries are counted: the browser, if this person has signed in with it before; else the address that was typed.</summary>
-    public string KeyOf(HttpRequest request, string address, Guid? accountId) =>
-        accountId is { } id && seal.Opened(request.Cookies[Cookie]) is { } note && note.StartsWith($"{id} ", StringComparison.Ordinal) ? note : address.ToUpperInvariant();
+    /// <summary>The browser's own note, if this person has signed in with it before.</summary>
+    public string? NoteOf(HttpRequest request, Guid? accountId) =>
+        accountId is { } id && seal.Opened(request.Cookies[Cookie]) is { } note && note.StartsWith($"{id} ", StringComparison.Ordinal) ? note : null;
 
     public void Remember(HttpContext context, Guid accountId)
     {

@@ -1,4 +1,5 @@
 using System.Globalization;
+using System.Net;
 using Microsoft.AspNetCore.Identity;
 
 namespace Credtrack.Web.Plumbing;
@@ -10,6 +11,9 @@ namespace Credtrack.Web.Plumbing;
 public sealed class PasswordPace(TimeProvider clock)
 {
     public const int Free = 10;
+
+    /// <summary>From many places together, for one address.</summary>
+    public const int FreeFromAll = 100;
     private const int Most = 100_000;
     private static readonly TimeSpan Longest = TimeSpan.FromMinutes(15), Forgotten = TimeSpan.FromDays(1);
 
@@ -17,19 +21,37 @@ public sealed class PasswordPace(TimeProvider clock)
     private readonly Lock door = new();
 
     /// <summary>Counts one more try as wrong, until it is found right; or says how long to wait before the next one is looked at.</summary>
-    public TimeSpan WaitBefore(string key)
+    public TimeSpan WaitBefore(string key, int free = Free)
     {
         lock (door)
         {
             var (now, (wrong, last)) = (clock.UtcNow(), tries.GetValueOrDefault(key));
             if (now - last > Forgotten) wrong = 0;
-            var next = last + (wrong < Free ? TimeSpan.Zero : TimeSpan.FromSeconds(Math.Min(Longest.TotalSeconds, Math.Pow(2, wrong - Free + 1))));
-            if (wrong >= Free && now < next) return next - now;
+            var next = last + (wrong < free ? TimeSpan.Zero : TimeSpan.FromSeconds(Math.Min(Longest.TotalSeconds, Math.Pow(2, wrong - free + 1))));
+            if (wrong >= free && now < next) return next - now;
             if (tries.Count >= Most) tries.Remove(tries.MinBy(t => (t.Value.Wrong, t.Value.Last)).Key);
             tries[key] = (wrong + 1, now);
             return TimeSpan.Zero;
         }
     }
+
+    /// <summary>
+    /// Of a browser that is not known: counted by address and by where it comes from, so that one stranger does not take the owner's turns; and, far
+    /// more loosely, by the address alone.
+    /// </summary>
+    public TimeSpan WaitBefore(string address, IPAddress? from)
+    {
+        var here = WaitBefore(Here(address, from));
+        return here > TimeSpan.Zero ? here : WaitBefore(address.ToUpperInvariant(), FreeFromAll);
+    }
+
+    public void Right(string address, IPAddress? from)
+    {
+        Right(Here(address, from));
+        Right(address.ToUpperInvariant());
+    }
+
+    private static string Here(string address, IPAddress? from) => $"{address.ToUpperInvariant()} {from}";
 
     public void Right(string key)
     {

@@ -38,6 +38,14 @@ public static class SecretFile
         }
     }
 
+    /// <summary>A file that the owner of the process alone can read (Unix).</summary>
+    public static FileStream New(string path)
+    {
+        var options = new FileStreamOptions { Mode = FileMode.Create, Access = FileAccess.Write };
+        if (!OperatingSystem.IsWindows()) options.UnixCreateMode = Owners;
+        return new FileStream(path, options);
+    }
+
     /// <summary>A folder that the owner of the process alone can read (Unix), made if there is none.</summary>
     public static void Folder(string path)
     {

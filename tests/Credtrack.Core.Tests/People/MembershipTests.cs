@@ -68,17 +68,17 @@ public sealed class MembershipTests
         Assert.Equal("Tess is already a Reader of Harbour.", person.WhyNotJoin(cast.Programme, new(MembershipKind.Reader, March(1))));
         Assert.Null(person.WhyNotJoin(cast.Programme, new(MembershipKind.Reader, March(1), March(9))));
         person.Admit(cora, site, cast.Programme, new(MembershipKind.Reader, March(21)), Cast.Noon);
-        Refused.With("Tess is already a Reader of Harbour on some of these days.", () => person.Change(cora, site, person.Memberships[0], new(MembershipKind.Reader, March(10), March(21)), [cora], Cast.Noon));
+        Refused.With("Tess is already a Reader of Harbour on some of these days.", () => person.Change(cora, site, person.Memberships[0], new(MembershipKind.Reader, March(10), March(21)), [cora], Cast.Today, Cast.Noon));
     }
 
     [Fact]
     public void A_change_says_from_what_to_what()
     {
         var membership = cast.Trainee.Memberships[0];
-        cast.Trainee.Change(cora, site, membership, new(MembershipKind.Trainee, Cast.Today, March(31), "year 3"), [cora], Cast.Noon);
+        cast.Trainee.Change(cora, site, membership, new(MembershipKind.Trainee, Cast.Today, March(31), "year 3"), [cora], Cast.Today, Cast.Noon);
         Assert.Equal("Cora changed how Tariq is a Trainee of Harbour: year group from none to year 3; last day from none to 2026-03-31.", cast.Trainee.NewFacts[^1].Sentence);
         var before = cast.Trainee.NewFacts.Count;
-        cast.Trainee.Change(cora, site, membership, new(MembershipKind.Trainee, Cast.Today, March(31), "year 3"), [cora], Cast.Noon);
+        cast.Trainee.Change(cora, site, membership, new(MembershipKind.Trainee, Cast.Today, March(31), "year 3"), [cora], Cast.Today, Cast.Noon);
         Assert.Equal(before, cast.Trainee.NewFacts.Count);
     }
 
@@ -86,10 +86,10 @@ public sealed class MembershipTests
     public void The_last_coordinator_stays_and_of_two_each_may_go()
     {
         var terms = new MembershipTerms(MembershipKind.Coordinator, Cast.Today, Cast.Today);
-        Refused.With("The last coordinator stays: make somebody else one first.", cora.WhyNotChange(administrator, site, cora.Memberships[0], terms, [cora]),
-            () => cora.Change(administrator, site, cora.Memberships[0], terms, [cora], Cast.Noon));
+        Refused.With(Last, cora.WhyNotChange(administrator, site, cora.Memberships[0], terms, [cora], Cast.Today),
+            () => cora.Change(administrator, site, cora.Memberships[0], terms, [cora], Cast.Today, Cast.Noon));
         var second = cast.Enrol("Cyril", MembershipKind.Coordinator);
-        cora.Change(second, site, cora.Memberships[0], terms, [cora, second], Cast.Noon);
+        cora.Change(second, site, cora.Memberships[0], terms, [cora, second], Cast.Today, Cast.Noon);
         Assert.Equal(Cast.Today, cora.Memberships[0].LastDay);
         // Told by the programme too: two who let each other go at one moment change the same noun.
         Assert.Equal("Cyril let Cora be a coordinator of this programme until 2026-03-01.", cast.Programme.NewFacts[^1].Sentence);
@@ -105,6 +105,32 @@ public sealed class MembershipTests
         Refused.With("This leave is taken back already.", cast.Trainee.WhyNotTakeBack(cora, site, leave), () => cast.Trainee.TakeBack(cora, site, leave, Cast.Noon));
         Assert.Null(cast.Trainee.WhyNotBeAway(cast.Programme, March(10), March(20)));
     }
+
+    [Fact]
+    public void Nor_does_the_last_coordinator_go_by_beginning_later()
+    {
+        var later = new MembershipTerms(MembershipKind.Coordinator, Cast.Today.AddDays(1));
+        Refused.With(Last, () => cora.Change(administrator, site, cora.Memberships[0], later, [cora], Cast.Today, Cast.Noon));
+        Refused.With(Last, cora.WhyNotEnd(administrator, site, cora.Memberships[0], [], Cast.Today), () => cora.End(administrator, site, cora.Memberships[0], [], Cast.Today, Cast.Noon));
+    }
+
+    [Fact]
+    public void A_membership_ends_at_once_also_on_the_day_it_began()
+    {
+        var membership = cast.Reader.Memberships[0];
+        cast.Reader.End(cora, site, membership, [], Cast.Today, Cast.Noon);
+        Assert.False(membership.IsOn(Cast.Today));
+        Assert.Equal("Cora ended at once that Ruth is a Reader of Harbour.", cast.Reader.NewFacts[^1].Sentence);
+        Refused.With("This membership is over.", cast.Reader.WhyNotEnd(cora, site, membership, [], Cast.Today), () => cast.Reader.End(cora, site, membership, [], Cast.Today, Cast.Noon));
+        Assert.Equal("Ruth began as a Reader of Harbour on 2026-03-01 before; begin on another day.", cast.Reader.WhyNotJoin(cast.Programme, Reader));
+        Assert.Null(cast.Reader.WhyNotJoin(cast.Programme, new(MembershipKind.Reader, March(2))));
+    }
+
+    [Fact]
+    public void A_leave_lies_within_the_membership() =>
+        Assert.Equal("These days lie outside the membership.", cast.Trainee.WhyNotBeAway(cast.Programme, new(1999, 1, 1), new(1999, 1, 5)));
+
+    private const string Last = "The last coordinator stays: make somebody else one first, who has chosen a password.";
 
     private static MembershipTerms Reader => new(MembershipKind.Reader, Cast.Today);
 

@@ -108,7 +108,7 @@ public sealed class InviteTests
         .Fills("Password", Staffing.NewPassword).Fills("The same password again", Staffing.NewPassword).Presses("Set up");
 
     /// <summary>As it is unpacked on a server.</summary>
-    private sealed class Empty() : RunningSite(BlankSite.NewFile())
+    internal sealed class Empty() : RunningSite(BlankSite.NewFile())
     {
         protected override void ConfigureWebHost(IWebHostBuilder builder)
         {

@@ -43,6 +43,31 @@ public sealed partial class HostileTextLaws(RunningSite site) : IClassFixture<Ru
         Assert.True(shown >= 15, $"hostile text came out as text on {shown} pages only");
     }
 
+    [Fact]
+    public async Task So_it_is_before_anybody_is_signed_in_and_where_a_password_is_chosen()
+    {
+        using var empty = new Commands.InviteTests.Empty();
+        var printed = new StringWriter();
+        await Web.Commands.Invite.Run(["--administrator"], printed, TextWriter.Null, empty.Services);
+        var link = new Uri(printed.ToString().Split('\n').Single(line => line.Contains("http", StringComparison.Ordinal)).Trim()).PathAndQuery;
+        using var stranger = empty.Visitor();
+        foreach (var text in Texts.Concat(Identifying()))
+        {
+            await stranger.Opens("/sign-in");
+            await stranger.Fills("E-mail address", text).Fills("Password", text).Presses("Sign in");
+            Assert.True(IsPage(stranger) && !stranger.Url.Equals("/", StringComparison.Ordinal), text);
+            Harmless(stranger);
+            await stranger.Opens(link);
+            if (stranger.Status == HttpStatusCode.Gone) break;
+            await stranger.Fills("Name of the institution", text).Fills("Time zone", "Europe/Dublin").Fills("Your name", text).Fills("Your e-mail address", "ada@tests.example").Fills("Password", Staffing.NewPassword).Fills("The same password again", Staffing.NewPassword).Presses("Set up");
+            Assert.True(IsPage(stranger), text);
+            Harmless(stranger);
+        }
+        Assert.Contains(Markup, await empty.Ask(db => db.Sites.Select(s => s.Name).ToListAsync()), StringComparer.Ordinal); // the first of the texts is a name like another
+        await stranger.SignsInWith("ada@tests.example", Staffing.NewPassword);
+        Assert.True(Harmless(stranger));
+    }
+
     /// <summary>What names a patient, as clinicians type it; invented examples, in a file of their own beside this one. A few together, as they fit into any field.</summary>
     private static string[] Identifying()
     {

@@ -38,4 +38,13 @@ public sealed class PasswordPaceTests
     [Fact]
     public void Many_at_one_moment_do_not_slip_through_together() =>
         Assert.Equal(10, Enumerable.Range(0, 500).AsParallel().WithDegreeOfParallelism(8).Count(_ => pace.WaitBefore("a") == TimeSpan.Zero));
+
+    [Fact]
+    public void One_stranger_does_not_take_the_turns_of_who_comes_from_elsewhere_and_many_together_are_slowed_too()
+    {
+        for (var n = 0; n < 50; n++) pace.WaitBefore("a@b.example", IPAddress.Parse("192.0.2.1"));
+        Assert.Equal(TimeSpan.Zero, pace.WaitBefore("A@B.example", IPAddress.Parse("192.0.2.2")));
+        var looked = Enumerable.Range(0, 500).Count(n => pace.WaitBefore("a@b.example", IPAddress.Parse($"198.51.{n / 250}.{n % 250}")) == TimeSpan.Zero);
+        Assert.InRange(looked, 85, 100);
+    }
 }

@@ -8,7 +8,7 @@ public sealed class AdministratorForm
 {
     private (Person Person, Account Account)? known;
 
-    [Display(Name = "Name"), Required(ErrorMessage = "Give the person's name."), StringLength(Person.LongestName, ErrorMessage = "A name has 120 characters at most.")]
+    [Display(Name = "Name"), Required(ErrorMessage = "Give the person's name."), StringLength(Person.LongestName, ErrorMessage = "A name has 120 characters at most."), OneLine]
     public string? Name { get; set; }
 
     [Display(Name = "E-mail address"), Required(ErrorMessage = "Give the person's e-mail address."), EmailAddress(ErrorMessage = "Write the address like name@hospital.example."), StringLength(Account.LongestAddress, ErrorMessage = "An address has 200 characters at most.")]
@@ -35,7 +35,7 @@ public sealed class AdministratorForm
 
 public sealed record AdministratorPage(AdministratorForm Form);
 
-public sealed record AdministratorLine(Person Person, DateTime BeganAt, string? WhyNotDismiss);
+public sealed record AdministratorLine(Person Person, DateTime BeganAt, bool SignsIn, string? WhyNotDismiss);
 
 public sealed record AdministratorsPage(IReadOnlyList<AdministratorLine> Lines)
 {
@@ -44,6 +44,11 @@ public sealed record AdministratorsPage(IReadOnlyList<AdministratorLine> Lines)
     public static async Task<AdministratorsPage> Load(CredtrackDb db, Me me)
     {
         var rows = await db.Sites.AsNoTracking().IgnoreAutoIncludes().SelectMany(s => s.Administrators).Where(a => a.EndedAt == null).OrderBy(a => a.BeganAt).Take(Most).Select(a => new { a.Person, a.BeganAt }).ToListAsync();
-        return new([.. rows.Select(r => new AdministratorLine(r.Person, r.BeganAt, me.Site.WhyNotDismiss(me.Person, r.Person)))]);
+        var able = await SigningIn(db);
+        return new([.. rows.Select(r => new AdministratorLine(r.Person, r.BeganAt, able.Contains(r.Person.Id), me.Site.WhyNotDismiss(me.Person, r.Person, able)))]);
     }
+
+    /// <summary>The administrators who have chosen a password.</summary>
+    public static Task<List<Guid>> SigningIn(CredtrackDb db) => db.Sites.IgnoreAutoIncludes().SelectMany(s => s.Administrators)
+        .Where(a => a.EndedAt == null && db.Users.Any(u => u.Id == a.PersonId && u.PasswordHash != null)).Select(a => a.PersonId).ToListAsync();
 }

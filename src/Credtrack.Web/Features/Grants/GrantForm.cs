@@ -10,7 +10,7 @@ public sealed class GrantForm
     public Guid Programme { get; set; }
     public string? Application { get; set; }
 
-    [Display(Name = "What is allowed"), Required(ErrorMessage = "Say what is allowed."), StringLength(200, ErrorMessage = "Keep it within 200 characters.")]
+    [Display(Name = "What is allowed"), Required(ErrorMessage = "Say what is allowed."), StringLength(200, ErrorMessage = "Keep it within 200 characters."), OneLine]
     public string? Privilege { get; set; }
 }
 

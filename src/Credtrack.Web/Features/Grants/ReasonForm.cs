@@ -8,7 +8,7 @@ public sealed class ReasonForm
 {
     public int Version { get; set; }
 
-    [Display(Name = "Reason"), Required(ErrorMessage = "Give the reason."), StringLength(Grant.LongestReason, ErrorMessage = "Keep it within 1,000 characters.")]
+    [Display(Name = "Reason"), Required(ErrorMessage = "Give the reason."), NamesNobody]
     public string? Reason { get; set; }
 }
 

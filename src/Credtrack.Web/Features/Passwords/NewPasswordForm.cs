@@ -7,13 +7,13 @@ public sealed class NewPasswordForm
 {
     public string? Key { get; set; }
 
-    [Display(Name = "Your name"), StringLength(Person.LongestName, ErrorMessage = "A name has 120 characters at most.")]
+    [Display(Name = "Your name"), StringLength(Person.LongestName, ErrorMessage = "A name has 120 characters at most."), OneLine]
     public string? Name { get; set; }
 
     [Display(Name = "Your e-mail address"), StringLength(Account.LongestAddress, ErrorMessage = "An address has 200 characters at most."), EmailAddress(ErrorMessage = "Write the address like name@hospital.example.")]
     public string? Address { get; set; }
 
-    [Display(Name = "Name of the institution"), StringLength(SiteEntry.LongestName, ErrorMessage = "A name has 120 characters at most.")]
+    [Display(Name = "Name of the institution"), StringLength(SiteEntry.LongestName, ErrorMessage = "A name has 120 characters at most."), OneLine]
     public string? SiteName { get; set; }
 
     [Display(Name = "Time zone")]

@@ -1,5 +1,6 @@
 using System.ComponentModel.DataAnnotations;
 using Credtrack.Web.Features.Programmes.Invitations;
+using Credtrack.Web.Features.Scans;
 using Microsoft.AspNetCore.Mvc.ModelBinding;
 
 namespace Credtrack.Web.Features.Programmes;
@@ -9,10 +10,10 @@ public sealed class ProgrammeForm
 {
     private (Person Person, Account Account)? known;
 
-    [Display(Name = "Name of the programme"), Required(ErrorMessage = "Give the programme a name."), StringLength(Programme.LongestName, ErrorMessage = "A name has 120 characters at most.")]
+    [Display(Name = "Name of the programme"), Required(ErrorMessage = "Give the programme a name."), StringLength(Programme.LongestName, ErrorMessage = "A name has 120 characters at most."), OneLine]
     public string? Name { get; set; }
 
-    [Display(Name = "Name of its coordinator"), Required(ErrorMessage = "Name the coordinator; it may be yourself."), StringLength(Person.LongestName, ErrorMessage = "A name has 120 characters at most.")]
+    [Display(Name = "Name of its coordinator"), Required(ErrorMessage = "Name the coordinator; it may be yourself."), StringLength(Person.LongestName, ErrorMessage = "A name has 120 characters at most."), OneLine]
     public string? Coordinator { get; set; }
 
     [Display(Name = "E-mail address of the coordinator"), Required(ErrorMessage = "Give the coordinator's e-mail address."), EmailAddress(ErrorMessage = "Write the address like name@hospital.example."), StringLength(Account.LongestAddress, ErrorMessage = "An address has 200 characters at most.")]
@@ -45,8 +46,8 @@ public sealed class RenamingForm
 {
     public int Version { get; set; }
 
-    [Display(Name = "Name of the programme"), Required(ErrorMessage = "Give the programme a name."), StringLength(Programme.LongestName, ErrorMessage = "A name has 120 characters at most.")]
+    [Display(Name = "Name of the programme"), Required(ErrorMessage = "Give the programme a name."), StringLength(Programme.LongestName, ErrorMessage = "A name has 120 characters at most."), OneLine]
     public string? Name { get; set; }
 }
 
-public sealed record RenamingPage(Programme Programme, RenamingForm Form);
+public sealed record RenamingPage(Programme Programme, IReadOnlyList<HistoryLine> History, RenamingForm Form);

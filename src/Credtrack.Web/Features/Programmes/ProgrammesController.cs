@@ -1,4 +1,5 @@
 using Credtrack.Web.Features.Programmes.Invitations;
+using Credtrack.Web.Features.Scans;
 
 namespace Credtrack.Web.Features.Programmes;
 
@@ -31,7 +32,7 @@ public sealed class ProgrammesController(CredtrackDb db, Me me, TimeProvider clo
     [HttpGet("{id:guid}/edit")]
     [Administrators]
     public async Task<IActionResult> Edit(Guid id) => await db.Programmes.AsNoTracking().Find(id) is { } programme
-        ? View("Edit", new RenamingPage(programme, new RenamingForm { Name = programme.Name, Version = programme.Version })) : NotFound();
+        ? View("Edit", new RenamingPage(programme, await HistoryLine.Latest(db, id), new RenamingForm { Name = programme.Name, Version = programme.Version })) : NotFound();
 
     [HttpPost("{id:guid}")]
     [Administrators]
@@ -39,7 +40,7 @@ public sealed class ProgrammesController(CredtrackDb db, Me me, TimeProvider clo
     {
         if (await db.Programmes.SingleOrDefaultAsync(p => p.Id == id) is not { } programme) return NotFound();
         if (ModelState.IsValid && await db.Programmes.AnyAsync(p => p.Id != id && p.Name == form.Name!.Trim())) ModelState.AddModelError("Form.Name", "Another programme has this name already.");
-        if (!ModelState.IsValid) return this.Again("Edit", new RenamingPage(programme, form));
+        if (!ModelState.IsValid) return this.Again("Edit", new RenamingPage(programme, await HistoryLine.Latest(db, id), form));
         db.Seen(programme, form.Version);
         programme.Rename(me.Person, me.Site, form.Name!.Trim(), clock.UtcNow());
         await db.SaveChangesAsync();

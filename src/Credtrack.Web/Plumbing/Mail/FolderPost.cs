@@ -9,7 +9,8 @@ public sealed class FolderPost(MailSettings settings) : IPost
         foreach (var letter in letters)
         {
             var (file, unfinished) = (Path.Combine(settings.Folder, $"{letter.Id}.eml"), Path.Combine(settings.Folder, $".{letter.Id}"));
-            using (var message = letter.From(settings)) await message.WriteToAsync(unfinished);
+            using (var message = letter.From(settings))
+            using (var stream = SecretFile.New(unfinished)) await message.WriteToAsync(stream);
             File.Move(unfinished, file, overwrite: true);
         }
         return [];

@@ -23,8 +23,8 @@ public sealed class SessionsTests(RunningSite site) : IClassFixture<RunningSite>
         using var thief = reader.Copied();
         Assert.Equal(HttpStatusCode.OK, (await thief.Opens($"/scans/{scan.Id}")).Status);
         using var coordinator = await world.As(await world.Coordinator());
-        await coordinator.Opens($"{await world.MembershipOf(world.Reader)}/edit");
-        await coordinator.Fills("First day", "2026-02-01").Fills("Last day", "2026-02-28").Presses("Save");
+        await coordinator.Opens(await world.MembershipOf(world.Reader));
+        await coordinator.Presses("End it now"); // it began today
         foreach (var url in new[] { $"/scans/{scan.Id}", "/scans", "/readings", $"/scans/{scan.Id}/readings/new", $"/scans/{scan.Id}/pictures/{scan.Pictures[0].Id}" })
         {
             Assert.Equal(HttpStatusCode.NotFound, (await reader.Opens(url)).Status);

@@ -9,7 +9,7 @@ public sealed class EndingsController(CredtrackDb db, Me me, TimeProvider clock)
     {
         var site = await db.Sites.SingleAsync();
         if (await db.People.SingleOrDefaultAsync(p => p.Id == personId) is not { } person || !site.IsAdministeredBy(person)) return NotFound();
-        site.Dismiss(me.Person, person, clock.UtcNow());
+        site.Dismiss(me.Person, person, await AdministratorsPage.SigningIn(db), clock.UtcNow());
         await db.SaveChangesAsync();
         return this.Done(personId == me.Person.Id ? "~/" : "~/administrators", "Ended");
     }

@@ -18,7 +18,7 @@ public sealed class SignatureForm
     [Display(Name = "Your signature means"), Required(ErrorMessage = "Choose what your signature means.")]
     public Meaning? Meaning { get; set; }
 
-    [Display(Name = "Why you sign although not everything is met"), StringLength(Grant.LongestReason, ErrorMessage = "Keep it within 1,000 characters.")]
+    [Display(Name = "Why you sign although not everything is met"), NamesNobody]
     public string? GapReason { get; set; }
 
     [Display(Name = "Your password, again"), DataType(DataType.Password), Required(ErrorMessage = "Enter your password, so that the signature is yours and not that of an open screen.")]

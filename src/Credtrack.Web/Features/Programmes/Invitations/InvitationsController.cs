@@ -12,7 +12,7 @@ public sealed class InvitationsController(CredtrackDb db, Me me, TimeProvider cl
     public async Task<IActionResult> Create(Guid programmeId, ListForm form)
     {
         if (await ListPage.Load(db, me, programmeId, form) is not { } page) return NotFound();
-        await page.Judge(inviting, me.Today(clock), ModelState);
+        await page.Judge(inviting, me, me.Today(clock), ModelState);
         if (!ModelState.IsValid) return this.Again("New", page);
         if (form.Seen != form.List) return View("New", page.Previewed(ModelState));
         page.Admit(me, inviting, clock.UtcNow());

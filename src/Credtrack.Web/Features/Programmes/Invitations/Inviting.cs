@@ -45,6 +45,7 @@ public sealed class Inviting(CredtrackDb db, IPost post, Settings settings, Me m
     /// <summary>After the save. A link that the mail server did not take is shown instead, so that it is not lost.</summary>
     public async Task<LinksPage> Deliver(Delivery delivery, string back)
     {
+        if (delivery == Delivery.Shown) await post.Send([.. made.Where(m => m.Account.HasPassword).Select(Notice)]);
         var failed = delivery == Delivery.ByMail ? (await post.Send([.. made.Select(Letter)])).Select(l => l.Id).ToHashSet() : [.. made.Select(m => m.Invitation.Id)];
         return new([.. made.Select(m => new LinkLine(m.Person.Name, m.Account.Email!, m.Link, !failed.Contains(m.Invitation.Id)))], back);
     }
@@ -58,5 +59,13 @@ public sealed class Inviting(CredtrackDb db, IPost post, Settings settings, Me m
         {made.Link}
 
         It works once, until {made.Invitation.GoodUntil.Printed(me.Zone)} ({me.Site.TimeZone}). If you do not know why you get this, leave it alone.
+        """);
+
+    // Who holds the link can sign in as this person, so the person hears of it.
+    private Letter Notice((Person Person, Account Account, Invitation Invitation, string Link) made) => new(Guid.CreateVersion7(clock.GetUtcNow()), made.Account.Email!, made.Person.Name,
+        $"Credtrack at {me.Site.Name}: a link for you was handed over", $"""
+        {made.Person.Name},
+
+        {me.Person.Name} has made a link with which a new password is chosen for your account, and hands it over outside of e-mail. If you did not ask for it, tell your programme's coordinator at once: whoever uses the link can sign in as you.
         """);
 }

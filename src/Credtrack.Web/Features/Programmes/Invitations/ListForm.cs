@@ -30,13 +30,14 @@ public sealed record ListPage(Programme Programme, string? WhyNot, ListForm Form
     public static async Task<ListPage?> Load(CredtrackDb db, Me me, Guid programmeId, ListForm form) =>
         await db.ProgrammesVisibleTo(me.Person, me.Site).Find(programmeId) is { } programme ? new(programme, programme.WhyNotStaff(me.Person, MembershipKind.Trainee, me.Site), form) : null;
 
-    public async Task Judge(Inviting inviting, DateOnly today, ModelStateDictionary faults)
+    public async Task Judge(Inviting inviting, Me me, DateOnly today, ModelStateDictionary faults)
     {
         if (!faults.IsValid) return;
         var (rows, wrong) = PastedList.Read(Form.List!);
         (Rows, known) = (rows, await inviting.Known(rows.Select(r => r.Address)));
         var refused = from row in rows
-                      let why = KnownAs(row)?.Person.WhyNotJoin(Programme, new MembershipTerms(row.Kind, today))
+                      let person = KnownAs(row)?.Person
+                      let why = person?.WhyNotAdmit(me.Person, me.Site, Programme, row.Kind) ?? person?.WhyNotJoin(Programme, new MembershipTerms(row.Kind, today))
                       where why is not null
                       select new PastedFault(row.Line, why);
         foreach (var fault in wrong.Concat(refused).OrderBy(f => f.Line)) faults.AddModelError("Form.List", $"Line {fault.Line}: {fault.Why}");

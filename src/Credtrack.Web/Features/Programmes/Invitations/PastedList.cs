@@ -1,4 +1,5 @@
 using System.ComponentModel.DataAnnotations;
+using Credtrack.Core.Plumbing;
 
 namespace Credtrack.Web.Features.Programmes.Invitations;
 
@@ -16,7 +17,7 @@ public static class PastedList
     public static (IReadOnlyList<PastedRow> Rows, IReadOnlyList<PastedFault> Faults) Read(string text)
     {
         var (rows, faults, seen) = (new List<PastedRow>(), new List<PastedFault>(), new Dictionary<string, int>());
-        foreach (var (index, line) in text.Split('\n').Index().Where(l => !string.IsNullOrWhiteSpace(l.Item)))
+        foreach (var (index, line) in text.ReplaceLineEndings("\n").Replace('\r', '\n').Split('\n').Index().Where(l => !string.IsNullOrWhiteSpace(l.Item)))
         {
             var number = index + 1;
             if (Row(number, Cells(line)) is var (row, why) && why is not null) faults.Add(new(number, why));
@@ -39,6 +40,7 @@ public static class PastedList
         if (cells.Length is < 3 or > 4) return (null, $"Expected three or four cells (name, address, membership, year group), found {cells.Length}.");
         var (name, address, year) = (cells[0], cells[1], cells.Length > 3 && cells[3].Length > 0 ? cells[3] : null);
         return name.Length is 0 or > Person.LongestName ? (null, $"The name is missing or longer than {Person.LongestName} characters.")
+            : TextLine.WhyNot(name + year, int.MaxValue) is { } odd ? (null, odd)
             : !Address.IsValid(address) || address.Length > Account.LongestAddress ? (null, $"“{address}” is no e-mail address.")
             : !Enum.TryParse<MembershipKind>(cells[2], ignoreCase: true, out var kind) || int.TryParse(cells[2], out _) ? (null, $"“{cells[2]}” is no membership; write {string.Join(", ", Enum.GetNames<MembershipKind>()).ToLowerInvariant()}.")
             : year is not null && kind != MembershipKind.Trainee ? (null, "Only trainees have a year group.")

@@ -7,10 +7,10 @@ public sealed class EditForm
 {
     public int Version { get; set; }
 
-    [Display(Name = "Name"), Required(ErrorMessage = "Give the person's name."), StringLength(Person.LongestName, ErrorMessage = "A name has 120 characters at most.")]
+    [Display(Name = "Name"), Required(ErrorMessage = "Give the person's name."), StringLength(Person.LongestName, ErrorMessage = "A name has 120 characters at most."), OneLine]
     public string? Name { get; set; }
 
-    [Display(Name = "Year group"), StringLength(MembershipTerms.LongestYearGroup, ErrorMessage = "Keep it within 40 characters.")]
+    [Display(Name = "Year group"), StringLength(MembershipTerms.LongestYearGroup, ErrorMessage = "Keep it within 40 characters."), OneLine]
     public string? YearGroup { get; set; }
 
     [Display(Name = "First day"), Required(ErrorMessage = "Give the first day.")]
@@ -22,19 +22,24 @@ public sealed class EditForm
 
 /// <param name="Absent">for whom this person stands in</param>
 /// <param name="Coordinators">who coordinates the programme with no last day</param>
-public sealed record EditPage(Person Person, Membership Membership, Person? Absent, IReadOnlyList<Person> Coordinators, string? WhyNot, EditForm Form)
+public sealed record EditPage(Person Person, Membership Membership, Person? Absent, IReadOnlyList<Person> Coordinators, string? WhyNot, DateOnly Today, EditForm Form)
 {
     private MembershipTerms Terms => new(Membership.Kind, Form.FirstDay ?? default, Form.LastDay, string.IsNullOrWhiteSpace(Form.YearGroup) ? null : Form.YearGroup.Trim(), Absent);
 
-    public static async Task<EditPage?> Load(CredtrackDb db, Me me, Guid programmeId, Guid id)
+    public static async Task<EditPage?> Load(CredtrackDb db, Me me, Guid programmeId, Guid id, DateOnly today)
     {
         if (await MembershipPage.Find(db.People, db, me, programmeId, id) is not { } found) return null;
         var (person, membership) = found;
-        var coordinators = await db.People.AsNoTracking().Where(p => p.Memberships.Any(m => m.ProgrammeId == programmeId && m.Kind == MembershipKind.Coordinator && m.LastDay == null)).Take(500).ToListAsync();
+        var coordinators = await CoordinatorsOf(db, programmeId, today);
         var form = new EditForm { Version = person.Version, Name = person.Name, YearGroup = membership.YearGroup, FirstDay = membership.FirstDay, LastDay = membership.LastDay };
         var absent = membership.StandsInForId is { } other ? await db.People.AsNoTracking().SingleAsync(p => p.Id == other) : null;
-        return new(person, membership, absent, coordinators, person.WhyNotAdmit(me.Person, me.Site, membership.Programme, membership.Kind), form);
+        return new(person, membership, absent, coordinators, person.WhyNotAdmit(me.Person, me.Site, membership.Programme, membership.Kind), today, form);
     }
+
+    /// <summary>Who coordinates a programme today, with no last day, and can sign in.</summary>
+    public static Task<List<Person>> CoordinatorsOf(CredtrackDb db, Guid programmeId, DateOnly today) => db.People.AsNoTracking()
+        .Where(p => p.Memberships.Any(m => m.ProgrammeId == programmeId && m.Kind == MembershipKind.Coordinator && m.FirstDay <= today && m.LastDay == null) && db.Users.Any(a => a.Id == p.Id && a.PasswordHash != null))
+        .Take(500).ToListAsync();
 
     public void Judge(ModelStateDictionary faults)
     {
@@ -44,7 +49,7 @@ public sealed record EditPage(Person Person, Membership Membership, Person? Abse
 
     public void Change(Me me, DateTime at)
     {
-        Person.Change(me.Person, me.Site, Membership, Terms, Coordinators, at);
+        Person.Change(me.Person, me.Site, Membership, Terms, Coordinators, Today, at);
         Person.Rename(me.Person, Form.Name!.Trim(), at);
     }
 }

@@ -7,7 +7,7 @@ namespace Credtrack.Web.Features.Programmes.Memberships;
 
 public sealed class MembershipForm
 {
-    [Display(Name = "Name"), Required(ErrorMessage = "Give the person's name."), StringLength(Person.LongestName, ErrorMessage = "A name has 120 characters at most.")]
+    [Display(Name = "Name"), Required(ErrorMessage = "Give the person's name."), StringLength(Person.LongestName, ErrorMessage = "A name has 120 characters at most."), OneLine]
     public string? Name { get; set; }
 
     [Display(Name = "E-mail address"), EmailAddress(ErrorMessage = "Write the address like name@hospital.example."), StringLength(Account.LongestAddress, ErrorMessage = "An address has 200 characters at most.")]
@@ -16,7 +16,7 @@ public sealed class MembershipForm
     [Display(Name = "Membership"), Required(ErrorMessage = "Choose what the person is in this programme.")]
     public MembershipKind? Kind { get; set; }
 
-    [Display(Name = "Year group"), StringLength(MembershipTerms.LongestYearGroup, ErrorMessage = "Keep it within 40 characters.")]
+    [Display(Name = "Year group"), StringLength(MembershipTerms.LongestYearGroup, ErrorMessage = "Keep it within 40 characters."), OneLine]
     public string? YearGroup { get; set; }
 
     [Display(Name = "First day"), Required(ErrorMessage = "Give the first day.")]

@@ -29,12 +29,12 @@ public sealed class MembershipsController(CredtrackDb db, Me me, TimeProvider cl
     }
 
     [HttpGet("{id:guid}/edit")]
-    public async Task<IActionResult> Edit(Guid programmeId, Guid id) => await EditPage.Load(db, me, programmeId, id) is { } page ? View("Edit", page) : NotFound();
+    public async Task<IActionResult> Edit(Guid programmeId, Guid id) => await EditPage.Load(db, me, programmeId, id, me.Today(clock)) is { } page ? View("Edit", page) : NotFound();
 
     [HttpPost("{id:guid}")]
     public async Task<IActionResult> Update(Guid programmeId, Guid id, EditForm form)
     {
-        if (await EditPage.Load(db, me, programmeId, id) is not { } page) return NotFound();
+        if (await EditPage.Load(db, me, programmeId, id, me.Today(clock)) is not { } page) return NotFound();
         page = page with { Form = form };
         page.Judge(ModelState);
         if (!ModelState.IsValid) return this.Again("Edit", page);

@@ -18,7 +18,7 @@ public sealed class EndingsTests : IClassFixture<EndingsTests.ItsOwnSite>
         using var ada = await world.As(person);
         await Ends(founder.Id);
         Assert.Equal("/administrators", ada.Url);
-        Assert.Contains("The last administrator stays: appoint another one first.", ada.Text, StringComparison.Ordinal);
+        Assert.Contains("The last administrator stays: appoint another one first, who has chosen a password.", ada.Text, StringComparison.Ordinal);
 
         var second = await world.Another("Bea");
         await Appoint(person.Id, second.Id);
@@ -26,7 +26,7 @@ public sealed class EndingsTests : IClassFixture<EndingsTests.ItsOwnSite>
         site.Rival.ActsBeforeNextSave(() => site.Ask(async db =>
         {
             var here = await db.Sites.SingleAsync();
-            here.Dismiss(await db.People.SingleAsync(p => p.Id == second.Id), await db.People.SingleAsync(p => p.Id == person.Id), world.Now);
+            here.Dismiss(await db.People.SingleAsync(p => p.Id == second.Id), await db.People.SingleAsync(p => p.Id == person.Id), [second.Id], world.Now);
             return await db.SaveChangesAsync();
         }));
         await Ends(second.Id);

@@ -119,7 +119,7 @@ public sealed class MembershipsTests(RunningSite site) : IClassFixture<RunningSi
         await ada.Opens($"{await world.MembershipOf(cyril)}/edit");
         await ada.Fills("Last day", "2026-03-31").Presses("Save");
         Assert.Equal(HttpStatusCode.Conflict, ada.Status);
-        Assert.Contains("The last coordinator stays: make somebody else one first.", ada.Text, StringComparison.Ordinal);
+        Assert.Contains("The last coordinator stays: make somebody else one first, who has chosen a password.", ada.Text, StringComparison.Ordinal);
     }
 
     [Fact]

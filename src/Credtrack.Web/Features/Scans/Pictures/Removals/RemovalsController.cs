@@ -19,6 +19,6 @@ public sealed class RemovalsController(CredtrackDb db, Me me, TimeProvider clock
         scan.TakeOut(me.Person, picture, form.Reason!.Trim(), clock.UtcNow());
         await db.SaveChangesAsync();
         await db.EraseUnused(files, [picture.Sha256]);
-        return this.Done($"~/scans/{scanId}", $"Picture {number} removed");
+        return this.Done($"~/scans/{scanId}", files.Has(picture.Sha256) ? $"Picture {number} removed here; another scan shows the same picture, and its file is erased when it is removed there too" : $"Picture {number} removed, its file erased");
     }
 }
