@@ -54,7 +54,7 @@ public sealed class RulebookTests
     }
 
     [Theory]
-    [InlineData("\"name\": \"two\\nlines\",", "$.name: expected one line of at most 200 characters, without control characters")]
+    [InlineData("\"name\": \"two\\nlines\",", "$.name: expected a text in one line, without control characters and marks that turn its direction")]
     [InlineData("\"name\": \"\",", "$.name: expected a text that is not empty")]
     public void An_edition_has_a_name_of_one_line(string name, string fault) =>
         Assert.Equal(fault, Assert.Single(Rulebook.Read(Book.Json("\"applications\": []").Replace("\"name\": \"Harbour\",", name, StringComparison.Ordinal), "UTC").Faults).ToString());

@@ -91,13 +91,13 @@ public sealed class ScanFactsTests
     [Fact]
     public void Free_text_is_never_quoted_in_a_fact()
     {
-        var scan = cast.Waiting(cast.Entry() with { Note = "Mrs Quillfeather" });
-        scan.Change(cast.Trainee, cast.Entry() with { Note = "Mr Quillfeather" }, [], [], Cast.Noon);
+        var scan = cast.Waiting(cast.Entry() with { Note = "quillfeather, twice" });
+        scan.Change(cast.Trainee, cast.Entry() with { Note = "quillfeather, once" }, [], [], Cast.Noon);
         scan.Change(cast.Trainee, cast.Entry(), [], [], Cast.Noon);
-        scan.Change(cast.Trainee, cast.Entry("lung") with { Note = "Quillfeather" }, [], [], Cast.Noon);
-        scan.SendBack(cast.Reader, "Ask Quillfeather.", Cast.Noon);
+        scan.Change(cast.Trainee, cast.Entry("lung") with { Note = "quillfeather" }, [], [], Cast.Noon);
+        scan.SendBack(cast.Reader, "Ask quillfeather.", Cast.Noon);
         scan.Submit(cast.Trainee, Cast.Noon);
-        scan.Read(cast.Reader, cast.Agreeing(scan) with { Feedback = "Quillfeather was sent home." }, Cast.Noon);
+        scan.Read(cast.Reader, cast.Agreeing(scan) with { Feedback = "quillfeather was sent home." }, Cast.Noon);
         Assert.Equal(9, scan.NewFacts.Count);
         Assert.All(scan.NewFacts, f => Assert.DoesNotContain("Quillfeather", f.Sentence + JsonSerializer.Serialize(f, f.GetType()), StringComparison.OrdinalIgnoreCase));
     }
