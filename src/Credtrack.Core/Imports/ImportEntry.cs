@@ -15,15 +15,13 @@ public sealed record ImportEntry(
     int Line, string Source, Application Application, string? Subtype, DateTime PerformedAt, string? Encounter, Role Role, Setting Setting, bool Indicated,
     Supervision Supervision, bool Assisted, ReadingEvidence? Reading, OutcomeEvidence? Outcome, string? Assumed)
 {
-    /// <summary>What cannot be so, each with the column it is about.</summary>
+    /// <summary>What cannot be so, each with the column it is about. A reading or an outcome of a later day is none yet in any standing, so it does no harm.</summary>
     public IEnumerable<(string Column, string Why)> Faults(Guid by, Guid? traineeId, DateTime now)
     {
         if (traineeId == by) yield return ("person", "this is you: nobody imports scans of their own. Leave these rows out, or let another coordinator import them");
         if (TextLine.WhyNot(Source, ImportedRow.LongestSource) is { } why) yield return ("scan", $"this id cannot be kept. {why}");
         if (PerformedAt > now) yield return ("performed_at", "this time has not come yet");
         if (PerformedAt.Year < ScanEntry.EarliestYear) yield return ("performed_at", "this is too long ago; check the year");
-        if (Reading?.At > now) yield return ("read_at", "this time has not come yet");
-        if (Outcome?.At > now) yield return ("outcome_at", "this time has not come yet");
         if (Subtype is not null && !Application.Subtypes.Contains(Subtype)) yield return ("subtype", $"expected a part of {Application.Name} as the catalogue has it{(Application.Subtypes.Count == 0 ? ", which has none" : $": {string.Join(", ", Application.Subtypes)}")}");
     }
 

@@ -11,20 +11,18 @@ public static class Guess
         var chosen = isChosen ? before.Columns : Columns(table, before);
         var times = Fields.All.Where(f => f.IsTime && chosen.ContainsKey(f.Name)).SelectMany(f => table.Says(chosen[f.Name])).ToList();
         var orders = DateOrders.Possible(times.Select(t => t.Trim()));
-        var words = Fields.All.Where(f => chosen.ContainsKey(f.Name) && ground.WordsOf(f) is not null).ToDictionary(f => f.Name, f => Words(f, table.Says(chosen[f.Name]), ground, before));
+        var words = Fields.All.Where(f => chosen.ContainsKey(f.Name) && ground.WordsOf(f) is not null && (f.Name == "application" || !table.IsOurs)).ToDictionary(f => f.Name, f => Words(f, table.Says(chosen[f.Name]), ground, before));
         return new(chosen, words, before.Dates is { } held && (isChosen || orders.Contains(held)) ? held : orders is [var only] ? only : null, People(table.Says(chosen.GetValueOrDefault("person")), ground, before, isChosen), []);
     }
 
     private static Dictionary<string, string> Columns(SentTable table, Mapping before)
     {
-        // A file in our own format is taken at its word: what is called otherwise in it is not ours.
-        var isOurs = Commands.ScansCsv.Required.All(table.Header.Contains);
         var free = table.Header.ToList();
         var found = new Dictionary<string, string>();
         foreach (var field in Fields.All)
         {
             var header = free.Contains(field.Name) ? field.Name
-                : isOurs ? null
+                : table.IsOurs ? null
                 : before.Columns.TryGetValue(field.Name, out var held) && free.Contains(held) ? held
                 : free.Find(field.IsCalled);
             if (header is null) continue;

@@ -11,6 +11,9 @@ public sealed class SentTable
     public char Separator { get; }
     public IReadOnlyList<string> Header => table.Header;
 
+    /// <summary>In our own format, which is taken at its word: a word that is none of its words is a fault there, no question.</summary>
+    public bool IsOurs => ScansCsv.Required.All(table.Header.Contains);
+
     private SentTable(string text, char separator)
     {
         (Text, Separator) = (text, separator);
@@ -28,7 +31,7 @@ public sealed class SentTable
         var header = text.AsSpan(0, text.AsSpan().IndexOfAny('\r', '\n') is >= 0 and var end ? end : text.Length);
         var sent = new SentTable(text, header.Contains(',') ? ',' : header.Contains(';') ? ';' : header.Contains('\t') ? '\t' : ',');
         fault = string.IsNullOrWhiteSpace(text)                      ? "This file is empty. Choose another one."
-            : sent.table.Faults.Find(f => f.Column is null) is { } f ? $"Line {f.Line}: {f.Expected}. Correct the file and send it again."
+            : sent.table.Faults.Find(f => f.Column is null && (f.Line == 1 || sent.table.Rows.Count is 0 or > Core.Imports.Import.MostRows)) is { } f ? $"Line {f.Line}: {f.Expected.TrimEnd('?')}. Correct the file and send it again."
             : sent.Header.Distinct().Count() < sent.Header.Count     ? "A column stands twice in the first line. Give each column a name of its own and send the file again."
             : sent.Header.Count < 2                                  ? "The first line names fewer than two columns. Save the table as CSV, with the names of its columns in the first line."
             : sent.table.Rows.Count == 0                             ? "This file has a header and no row. Choose another one."

@@ -9,7 +9,7 @@ public sealed class ImportsTests(RunningSite site) : IClassFixture<RunningSite>
     {
         var world = await site.NewWorld();
         using var cora = await (await world.As(await world.Coordinator())).Opens("/guides/imports");
-        Assert.Equal(Credtrack.Web.Features.Imports.Fields.All.Select(f => f.Name), cora.Page.QuerySelectorAll("tbody th code").Select(c => c.TextContent));
+        Assert.Equal(Credtrack.Web.Features.Imports.Fields.All.Select(f => f.Name), cora.Page.QuerySelectorAll("tbody th span").Select(c => c.TextContent));
         using var http = new HttpClient { BaseAddress = site.ClientOptions.BaseAddress };
         await cora.Maps(await http.GetStringAsync(new Uri(cora.Page.QuerySelector("a[download]")!.GetAttribute("href")!, UriKind.Relative)));
         Assert.Empty(cora.Told());

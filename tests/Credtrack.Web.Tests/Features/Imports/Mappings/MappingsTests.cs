@@ -32,7 +32,12 @@ public sealed class MappingsTests(RunningSite site) : IClassFixture<RunningSite>
     public async Task Two_of_one_name_are_asked_for_and_rows_can_be_left_out()
     {
         var world = await site.NewWorld();
-        var (one, two) = (await world.Another("Sam", MembershipKind.Trainee), await world.Another("Sam", MembershipKind.Trainee));
+        var (one, two) = (await world.Another("Sam", MembershipKind.Trainee), await world.Another("Sammy", MembershipKind.Trainee));
+        await site.Ask(async db =>
+        {
+            (await db.People.SingleAsync(p => p.Id == two.Id)).Rename(world.Director, one.Name, world.Now);
+            return await db.SaveChangesAsync();
+        });
         using var cora = await world.As(await world.Coordinator());
         await cora.Uploads(Importing.Table(world.Row("1", one.Name), world.Row("2", "Visitor Zed")));
         await cora.Presses(Importing.GoOn);

@@ -34,7 +34,7 @@ public sealed class UndosTests(RunningSite site) : IClassFixture<RunningSite>
         await world.With(unread, s => s.Attach(world.Trainee, site.Still, world.Now));
         await world.Signed();
         await cora.Opens(url);
-        Assert.Equal([$"Cardiac of {world.Trainee.Name}, Sat 28 Feb 2026: among the evidence of a signature", $"Lung of {world.Trainee.Name}, Sat 28 Feb 2026: changed since by its trainee"], Named(cora));
+        Assert.Equal([$"Focused cardiac of {world.Trainee.Name}, Sat 28 Feb 2026: among the evidence of a signature", $"Lung of {world.Trainee.Name}, Sat 28 Feb 2026: changed since by its trainee"], Named(cora));
         Assert.Contains("Scans of this import are in use since", cora.Text, StringComparison.Ordinal);
         await cora.Sends($"/imports/{cora.Id()}/undos", new FormUrlEncodedContent([]));
         Assert.Equal(2, await world.Evidence());
