@@ -13,7 +13,7 @@ public sealed record PlannedRow(int Line, string Source, string Person, string C
 /// <summary>What a file will do: row by row, or every fault with its line and column. Nothing is saved by it.</summary>
 public sealed record ImportPlan(IReadOnlyList<PlannedRow> Rows, IReadOnlyList<CsvFault> Faults, IReadOnlyList<string> Dropped, Mapping Mapping)
 {
-    public const string IsNew = "is added", IsHere = "is here already", IsOut = "left out, as chosen";
+    public const string IsNew = "is added", IsHere = "is here already", IsOut = "left out, as chosen", IsWrong = "is at fault";
 
     public IEnumerable<PlannedRow> New => Rows.Where(r => r.Entry is not null);
     public int Here => Rows.Count(r => r.What == IsHere);
@@ -49,13 +49,14 @@ public sealed record ImportPlan(IReadOnlyList<PlannedRow> Rows, IReadOnlyList<Cs
         if (ground.Applications.FirstOrDefault(a => a.Code == scan.Application) is not { } application)
         {
             faults.Add(new(row.Line, "application", "expected the code of an application of the catalogue; add it there, or say which one this word means"));
-            return planned;
+            return planned with { What = IsWrong };
         }
         var entry = new ImportEntry(row.Line, scan.Scan, application, scan.Subtype, Whole(scan.PerformedAt), scan.Encounter, scan.Role, scan.Setting, scan.Indicated, scan.Supervision, scan.Assisted,
             scan.Reading is { } reading ? reading with { At = Whole(reading.At) } : null, scan.Outcome is { } outcome ? outcome with { At = Whole(outcome.At) } : null,
             row.Assumed.Count == 0 ? null : string.Join(", ", row.Assumed));
+        var before = faults.Count;
         faults.AddRange(entry.Faults(ground.By.Id, Trainee(row.Person, choice, ground), ground.Now).Append(WhyNotPerson(row.Person, choice, ground, mapping)).Where(f => f.Why.Length > 0).Select(f => new CsvFault(row.Line, f.Column, f.Why)));
-        return planned with { What = IsNew, Entry = entry };
+        return faults.Count > before ? planned with { What = IsWrong } : planned with { What = IsNew, Entry = entry };
     }
 
     private static (string Column, string Why) WhyNotPerson(string cell, string choice, ImportGround ground, Mapping mapping) => ("person",

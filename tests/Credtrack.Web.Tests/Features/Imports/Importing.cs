@@ -39,6 +39,10 @@ internal static class Importing
 
     public static IReadOnlyList<string> Told(this Visitor visitor) => [.. visitor.Page.QuerySelectorAll(".notice.bad li").Select(l => string.Join(' ', l.TextContent.Split((char[]?)null, StringSplitOptions.RemoveEmptyEntries)))];
 
+    /// <summary>Presses a button that the page does not show.</summary>
+    public static Task<Visitor> Posts(this Visitor visitor, string url) =>
+        visitor.Sends(url, new FormUrlEncodedContent([new("__RequestVerificationToken", visitor.Page.QuerySelector("[name=__RequestVerificationToken]")!.GetAttribute("value")!)]));
+
     /// <summary>How many scans are evidence, of one person or of the whole programme.</summary>
     public static Task<int> Evidence(this World world, Person? person = null) => world.Site.Ask(async db =>
     {

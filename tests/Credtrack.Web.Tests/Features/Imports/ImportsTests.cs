@@ -1,3 +1,4 @@
+using System.Data.Common;
 using System.Diagnostics;
 using System.Globalization;
 using System.Text;
@@ -65,7 +66,7 @@ public sealed class ImportsTests : IClassFixture<RunningSite>
         }
         using var trainee = await (await world.As(world.Trainee)).Opens($"/standings/{world.Trainee.Id}");
         Assert.Contains($"read elsewhere, attested by {importer.Name}, quality 4 of 5", trainee.Text, StringComparison.Ordinal);
-        using var others = await site.Ask(async db => await Task.FromResult(await world.As(world.Director)));
+        using var others = await world.As(world.Director);
         Assert.Contains("Count 2", (await others.Opens($"/standings/{world.Trainee.Id}")).Text, StringComparison.Ordinal);
     }
 
@@ -85,8 +86,8 @@ public sealed class ImportsTests : IClassFixture<RunningSite>
         await cora.Maps(Importing.Table(string.Join(',', cells), world.Row("b-2", world.Trainee.Name)));
         Assert.Equal(told.Split('|'), cora.Told());
         Assert.Contains("Nothing is imported while a row is at fault", cora.Text, StringComparison.Ordinal);
-        await cora.Sends($"/imports/{cora.Id()}/confirmations", new FormUrlEncodedContent([]));
-        Assert.Equal(0, await world.Evidence());
+        await cora.Posts($"/imports/{cora.Id()}/confirmations");
+        Assert.Equal((HttpStatusCode.Conflict, 0), (cora.Status, await world.Evidence()));
     }
 
     [Fact]
@@ -159,14 +160,15 @@ public sealed class ImportsTests : IClassFixture<RunningSite>
         Assert.DoesNotContain($"{both.Id}", twain.Page.Body!.InnerHtml, StringComparison.Ordinal);
         await twain.Fills($"{both.Name} is", "new").Presses(Importing.GoOn);
         Assert.Equal(["Line 2, column “person”: this is you: nobody imports scans of their own. Leave these rows out, or let another coordinator import them."], twain.Told());
-        await Assert.ThrowsAsync<DbUpdateException>(() => site.Ask(async db =>
+        var draft = await world.Draft();
+        var fault = await Assert.ThrowsAnyAsync<DbException>(() => site.Ask(async db =>
         {
             var import = Credtrack.Core.Imports.Import.Upload(both, world.Programme, "x.csv", [1], world.Now);
             db.Add(import);
             await db.SaveChangesAsync();
-            var scan = (await world.Draft()).Id;
-            return await db.Database.ExecuteSqlAsync($"INSERT INTO ImportedRows (ScanId, ImportId, ProgrammeId, TraineeId, AttestedById, Source, Line, Supervision, IsRead) VALUES ({scan}, {import.Id}, {world.Programme.Id}, {both.Id}, {both.Id}, 'x', 2, 'Later', 0)");
-        }).ContinueWith(t => t.Exception is null ? t.Result : throw new DbUpdateException("", t.Exception.InnerException), TaskScheduler.Default));
+            return await db.Database.ExecuteSqlAsync($"INSERT INTO ImportedRows (ScanId, ImportId, ProgrammeId, TraineeId, AttestedById, Source, Line, Supervision, IsRead) VALUES ({draft.Id}, {import.Id}, {world.Programme.Id}, {both.Id}, {both.Id}, 'x', 2, 'Later', 0)");
+        }));
+        Assert.Contains("CK_ImportedRows_not_ones_own", fault.Message, StringComparison.Ordinal);
     }
 
     [Fact]
@@ -180,6 +182,7 @@ public sealed class ImportsTests : IClassFixture<RunningSite>
         {
             using var visitor = await world.As(person);
             foreach (var page in new[] { url, $"{url}/mappings/new" }) Assert.Equal(HttpStatusCode.NotFound, (await visitor.Opens(page)).Status);
+            foreach (var verb in new[] { "mappings", "confirmations", "undos", "discards" }) Assert.Equal(HttpStatusCode.NotFound, (await (await visitor.Opens("/")).Posts($"{url}/{verb}")).Status);
             if (!person.Name.StartsWith("Cora", StringComparison.Ordinal)) Assert.Equal(HttpStatusCode.NotFound, (await visitor.Opens("/imports")).Status);
         }
         using var second = await (await world.As(await world.Another("Cole", MembershipKind.Coordinator))).Opens(url);

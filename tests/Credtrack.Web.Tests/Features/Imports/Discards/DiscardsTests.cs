@@ -13,8 +13,8 @@ public sealed class DiscardsTests(RunningSite site) : IClassFixture<RunningSite>
         await cora.Presses("Throw this import away");
         var id = cora.Id();
         Assert.Null(await site.Ask(db => db.Set<ImportFile>().Where(f => f.ImportId == id).Select(f => f.Content).SingleAsync()));
-        await cora.Sends($"/imports/{id}/confirmations", new FormUrlEncodedContent([]));
-        Assert.Equal(0, await world.Evidence());
+        await cora.Posts($"/imports/{id}/confirmations");
+        Assert.Equal((HttpStatusCode.Conflict, 0), (cora.Status, await world.Evidence()));
         Assert.Equal(HttpStatusCode.NotFound, (await cora.Opens($"/imports/{id}/mappings/new")).Status);
     }
 

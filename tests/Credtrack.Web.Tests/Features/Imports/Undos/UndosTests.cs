@@ -36,8 +36,8 @@ public sealed class UndosTests(RunningSite site) : IClassFixture<RunningSite>
         await cora.Opens(url);
         Assert.Equal([$"Focused cardiac of {world.Trainee.Name}, Sat 28 Feb 2026: among the evidence of a signature", $"Lung of {world.Trainee.Name}, Sat 28 Feb 2026: changed since by its trainee"], Named(cora));
         Assert.Contains("Scans of this import are in use since", cora.Text, StringComparison.Ordinal);
-        await cora.Sends($"/imports/{cora.Id()}/undos", new FormUrlEncodedContent([]));
-        Assert.Equal(2, await world.Evidence());
+        await cora.Posts($"/imports/{cora.Id()}/undos");
+        Assert.Equal((HttpStatusCode.Conflict, 2), (cora.Status, await world.Evidence()));
     }
 
     [Fact]
