@@ -11,7 +11,7 @@ public sealed partial class Scan
     public Confirmation? Confirmation => confirmations.SingleOrDefault(c => c.IsAbout(this));
 
     /// <summary>Somebody is named who was at the bedside, and has not said otherwise.</summary>
-    public bool IsSupervised => Supervision == Supervision.Direct && Confirmation is not { WasThere: false };
+    public bool IsSupervised => Supervision == Supervision.Direct && SupervisorId is not null && Confirmation is not { WasThere: false };
 
     /// <summary>What counts, of all that the trainee, the person named and the governing reader said.</summary>
     public Supervision CountingSupervision => Counting(readings.MinBy(r => r.Number));
@@ -33,5 +33,5 @@ public sealed partial class Scan
         Record(wasThere ? new SupervisionConfirmed(by, at) : new SupervisionDenied(by, at));
     }
 
-    private Supervision Counting(Reading? governing) => Supervisions.Counting(Supervision, SupervisorId, governing?.ReaderId, governing?.AtMost, Confirmation?.WasThere);
+    private Supervision Counting(Reading? governing) => Supervisions.Counting(Supervision, SupervisorId, governing?.ReaderId, governing?.AtMost, Confirmation?.WasThere, IsAttested);
 }

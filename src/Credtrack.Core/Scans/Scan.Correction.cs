@@ -9,6 +9,7 @@ public sealed partial class Scan
     public string? WhyNotCorrect(Person by, Reading reading) =>
           reading.ReaderId != by.Id                    ? "Only the reader who gave a reading corrects it."
         : !by.Is(MembershipKind.Reader, ProgrammeId)   ? "Only this programme's readers correct its readings."
+        : reading.IsElsewhere                          ? "This reading was given elsewhere and attested with its import; it is not corrected here."
         : Withdrawal is not null                       ? "This scan is withdrawn."
         : null;
 

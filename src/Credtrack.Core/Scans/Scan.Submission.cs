@@ -32,7 +32,7 @@ public sealed partial class Scan
     }
 
     public string? WhyNotDiscard(Person by) =>
-        WhyNotChange(by) ?? (submissions.Count > 0 ? "Only a draft that was never submitted is discarded." : null);
+        WhyNotChange(by) ?? (submissions.Count > 0 || Imported is not null ? "Only a draft that was never submitted is discarded." : null);
 
     public void Discard(Person by, DateTime at)
     {
@@ -45,7 +45,7 @@ public sealed partial class Scan
     public string? WhyNotWithdraw(Person by) =>
           by.Id != TraineeId         ? "Only the person who logged a scan withdraws it."
         : Withdrawal is not null     ? "This scan is withdrawn."
-        : submissions.Count == 0     ? "This scan is a draft: discard it, there is nothing to withdraw."
+        : State == ScanState.Draft   ? "This scan is a draft: discard it, there is nothing to withdraw."
         : null;
 
     /// <summary>Gone from the standing of every day, whatever stands in it. What was signed before keeps its evidence.</summary>
@@ -53,6 +53,7 @@ public sealed partial class Scan
     {
         RuleBroken.If(WhyNotWithdraw(by) ?? FreeText.WhyNotReason(reason));
         Withdrawal = new Withdrawal(this, by, reason, at);
+        Imported?.LetGo();
         Record(new ScanWithdrawn(by, at));
     }
 }

@@ -23,7 +23,7 @@ public sealed record ScanEntry(
         if (PerformedAt > now) yield return (nameof(PerformedAt), "This time has not come yet. Enter when the scan was performed.");
         if (PerformedAt.Year < EarliestYear) yield return (nameof(PerformedAt), "This is too long ago. Check the year.");
         if (Subtype is not null && !(changed?.PartsUnder(Application) ?? Application.Subtypes).Contains(Subtype)) yield return (nameof(Subtype), $"Choose a part that belongs to {Application.Name}, or none.");
-        if (Supervision == Supervision.Direct && Supervisor is null) yield return (nameof(Supervisor), "Name the person who supervised at the bedside.");
+        if (Supervision == Supervision.Direct && Supervisor is null && changed is not { Imported.Supervision: Supervision.Direct, SupervisorId: null }) yield return (nameof(Supervisor), "Name the person who supervised at the bedside.");
         if (Supervisor?.Id == traineeId) yield return (nameof(Supervisor), "Nobody supervises themselves.");
         else if (Supervisor is not null && !Supervisor.Is(MembershipKind.Reader, programmeId)) yield return (nameof(Supervisor), "Choose a reader of this programme.");
         if (Note?.Length > LongestNote) yield return (nameof(Note), $"Keep the note within {LongestNote} characters.");

@@ -5,6 +5,9 @@ namespace Credtrack.Web.Commands;
 /// <summary>One record of a table. What is not as expected becomes a fault of the table at this line and column.</summary>
 public sealed class CsvRow(CsvTable table, int line, string[] cells)
 {
+    /// <summary>The first physical line of the record.</summary>
+    public int Line => line;
+
     /// <summary>The cell; null where it is empty or the column is not there.</summary>
     public string? this[string column] => table.PlaceOf(column) is { } place && cells[place].Length > 0 ? cells[place] : null;
 

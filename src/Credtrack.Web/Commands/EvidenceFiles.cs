@@ -58,5 +58,5 @@ public sealed class EvidenceFiles
     }
 
     // The name of a column comes from the file and may hold anything.
-    private static string OneLine(string name) => new([.. name.Select(letter => char.IsControl(letter) ? ' ' : letter)]);
+    internal static string OneLine(string name) => new([.. name.Select(letter => char.IsControl(letter) ? ' ' : letter)]);
 }

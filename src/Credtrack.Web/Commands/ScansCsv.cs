@@ -7,19 +7,27 @@ using Credtrack.Core.Scans;
 namespace Credtrack.Web.Commands;
 
 /// <summary>One person's scan, as scans.csv has it.</summary>
-public sealed record PersonScan(string Person, ScanEvidence Scan);
+/// <param name="Assumed">The cells that took a default, in words.</param>
+public sealed record PersonScan(int Line, string Person, ScanEvidence Scan, IReadOnlyList<string> Assumed);
 
 /// <summary>The table of scans.</summary>
 public static class ScansCsv
 {
     private static readonly Dictionary<string, int> Qualities = Enumerable.Range(1, 5).ToDictionary(q => $"{q}");
 
+    public static IReadOnlyList<string> Required { get; } = ["scan", "person", "application", "performed_at"];
+
+    // In the order in which people ask for them.
+    private static readonly (string Column, string Words)[] Defaults =
+        [("indicated", "indicated"), ("setting", "clinical"), ("role", "performed"), ("supervision", "supervised later"), ("assisted", "no hands-on help")];
+
     /// <param name="text">The text of the file.</param>
     /// <param name="zone">The rulebook's zone; null if it is at fault: then days cannot be compared and are not.</param>
     /// <param name="faults">Every fault of the table is added here.</param>
-    public static IReadOnlyList<PersonScan> Read(string text, TimeZoneInfo? zone, List<CsvFault> faults)
+    /// <param name="meaning">How a table that others made is read; null if it is in our format.</param>
+    public static IReadOnlyList<PersonScan> Read(string text, TimeZoneInfo? zone, List<CsvFault> faults, CsvMeaning? meaning = null)
     {
-        var table = CsvTable.Read(text, ["scan", "person", "application", "performed_at"]);
+        var table = CsvTable.Read(text, Required, meaning);
         var ids = new HashSet<string>(StringComparer.Ordinal);
         var scans = table.Rows.Select(row => Scan(row, zone, ids)).ToList();
         faults.AddRange(table.Faults.OrderBy(fault => fault.Line));
@@ -37,7 +45,7 @@ public static class ScansCsv
             row.Word("role", RuleWords.Roles, Role.Performed), row.Word("setting", RuleWords.Settings, Setting.Clinical),
             row.Word("indicated", RuleWords.YesNo, true), row.Word("supervision", RuleWords.Supervisions, Supervision.Later),
             row.Word("assisted", RuleWords.YesNo, false), Reading(row, performed, zone), Outcome(row, zone));
-        return new(person, scan);
+        return new(row.Line, person, scan, [.. Defaults.Where(d => row[d.Column] is null).Select(d => d.Words)]);
     }
 
     private static ReadingEvidence? Reading(CsvRow row, DateTime? performed, TimeZoneInfo? zone)

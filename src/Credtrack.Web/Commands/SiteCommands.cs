@@ -3,20 +3,23 @@ using Credtrack.Web.Features.Documents.Seals;
 
 namespace Credtrack.Web.Commands;
 
-/// <summary>The commands that use the site's own database and serve nothing. But for invite they change nothing.</summary>
+/// <summary>The commands that use the site's own database and serve nothing. Check and verify change nothing.</summary>
 public static class SiteCommands
 {
-    public static bool Are(string[] args) => args is ["check" or "verify" or "invite", ..];
+    public static bool Are(string[] args) => args is ["check" or "verify" or "invite" or "migrate" or "demo" or "import", ..];
 
     /// <summary>The exit status of the command, or null if the arguments are none.</summary>
     public static async Task<int?> Run(string[] args, IServiceProvider services)
     {
         if (!Are(args) || args is not [var command, .. var rest]) return null;
         if (command == "invite") return await Invite.Run(rest, Console.Out, Console.Error, services);
+        if (command == "migrate") return await Fill.Migrate(rest, services);
+        if (command == "demo") return await Fill.Demonstrate(rest, services);
         if (command == "check" && rest.Length == 0) return await Check.Run(rest, Console.Out, Console.Error);
         await using var scope = services.CreateAsyncScope();
         var (db, settings) = (scope.ServiceProvider.GetRequiredService<CredtrackDb>(), services.GetRequiredService<Settings>());
         if (await WhyNotAsk(db) is { } why) return await Refused(why);
+        if (command == "import") return await ImportFile.Run(rest, Console.Out, Console.Error, scope.ServiceProvider);
         if (command == "verify") return await Verify.Run(rest, Console.Out, Console.Error, db);
         if (!File.Exists(settings.Seal.Certificate)) return await Refused($"There is no certificate of the seal, {settings.Seal.Certificate}: this site has sealed nothing yet.");
         return await Check.Run(rest, Console.Out, Console.Error, services.GetRequiredService<SealTrust>(), sha256 => Find(db, sha256));

@@ -11,7 +11,7 @@ public static class Signs
 {
     public static SwatchKind Swatch(this ScanState state) => state switch
     {
-        ScanState.Draft => SwatchKind.Draft,
+        ScanState.Draft or ScanState.Imported => SwatchKind.Draft,
         ScanState.Waiting => SwatchKind.Hatch,
         ScanState.Returned => SwatchKind.Back,
         ScanState.Read => SwatchKind.Solid,

@@ -1,3 +1,4 @@
+using System.Buffers;
 using System.Text;
 using System.Text.Unicode;
 
@@ -13,5 +14,13 @@ public static class Utf8Text
             : !Utf8.IsValid(bytes) ? "This file is not written in UTF-8, perhaps in an older Windows encoding. Save it as UTF-8 and send it again."
             : null;
         return fault is null ? Encoding.UTF8.GetString(bytes is [0xEF, 0xBB, 0xBF, ..] ? bytes[3..] : bytes) : null;
+    }
+
+    /// <summary>The line of the first byte that is no UTF-8.</summary>
+    public static int FirstBadLine(ReadOnlySpan<byte> bytes)
+    {
+        var at = 0;
+        while (Rune.DecodeFromUtf8(bytes[at..], out _, out var length) == OperationStatus.Done) at += length;
+        return bytes[..at].Count((byte)'\n') + 1;
     }
 }

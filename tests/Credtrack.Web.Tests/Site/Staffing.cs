@@ -9,9 +9,9 @@ internal static class Staffing
     public const string NewPassword = "three green herons wade";
 
     /// <summary>Somebody who looks after the site and is in no programme.</summary>
-    public static async Task<Person> Administrator(this World world)
+    public static async Task<Person> Administrator(this World world, string name = "Ada")
     {
-        var person = await world.Another("Ada");
+        var person = await world.Another(name);
         await world.Site.Ask(async db =>
         {
             var site = await db.Sites.SingleAsync();

@@ -57,7 +57,7 @@ public static class ScanFormEntry
         if (form.IsDraft && page.Scan?.State != ScanState.Waiting) return [];
         var asked = page.Scan?.QuestionsUnder(entry.Application) ?? entry.Application.Questions;
         var answers = asked.Select(q => q.With(entry.Answers.TryGetValue(q.Code, out var given) ? given : null));
-        return Scan.Missing(answers, page.PicturesAfter, entry.Supervision == Supervision.Direct);
+        return Scan.Missing(answers, page.PicturesAfter, entry.Supervision == Supervision.Direct && entry.Supervisor is not null);
     }
 
     private static int? Number(string? typed, string field, int scale, string example, ModelStateDictionary faults)

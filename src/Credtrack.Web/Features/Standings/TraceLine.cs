@@ -9,7 +9,7 @@ public sealed record TraceLine(Finding Finding, Guid ScanId, string Application,
     /// <summary>The scans that the viewer may open, newest first. Those of other programmes are in the counts alone.</summary>
     public static async Task<IReadOnlyList<TraceLine>> Load(CredtrackDb db, Person viewer, Guid personId, Standing standing, Dictionary<string, string> names)
     {
-        var scans = await db.ScansVisibleTo(viewer).AsNoTracking().Where(s => s.TraineeId == personId && s.Submissions.Any()).ToDictionaryAsync(s => s.Id.ToString());
+        var scans = await db.ScansVisibleTo(viewer).AsNoTracking().Handed().Where(s => s.TraineeId == personId).ToDictionaryAsync(s => s.Id.ToString());
         return [.. from finding in standing.Findings.Reverse()
                    where scans.ContainsKey(finding.Scan)
                    let scan = scans[finding.Scan]
@@ -23,7 +23,12 @@ public sealed record TraceLine(Finding Finding, Guid ScanId, string Application,
     {
         if (finding.Verdict == Verdict.Pending && scan.ReturnedWith is { } back) return $"returned: {back.Missing}";
         var read = finding.Seen.Reading is null ? null : scan.Readings.MinBy(r => r.Number);
-        var by = read is null ? "" : $"read by {read.Reader.Name}{(read.Quality is { } quality ? $", quality {quality} of 5" : "")}";
-        return finding.Words() is { } why ? by.Length > 0 && finding.Verdict == Verdict.Excluded ? $"{why}; {by}" : why : by;
+        string?[] said =
+        [
+            read is null ? scan.State == ScanState.Imported ? "imported unread" : null : $"{(read.IsElsewhere ? "read elsewhere, attested" : "read")} by {read.Reader.Name}{(read.Quality is { } quality ? $", quality {quality} of 5" : "")}",
+            scan.Imported?.Assumed is { } assumed ? $"assumed: {assumed}" : null,
+        ];
+        var by = string.Join("; ", said.OfType<string>());
+        return finding.Words() is { } why ? by.Length > 0 && (finding.Verdict == Verdict.Excluded || scan.Imported is not null) ? $"{why}; {by}" : why : by;
     }
 }

@@ -53,10 +53,10 @@ public sealed class AdministratorsTests(RunningSite site) : IClassFixture<Runnin
     }
 
     [Fact]
-    public async Task The_list_is_asked_for_in_three_questions()
+    public async Task The_list_is_asked_for_in_four_questions()
     {
         var world = await site.NewWorld();
         using var ada = await world.As(await world.Administrator());
-        Assert.Equal(3, (await site.Queries.During(() => ada.Opens("/administrators"))).Count);
+        Assert.Equal(4, (await site.Queries.During(() => ada.Opens("/administrators"))).Count);
     }
 }

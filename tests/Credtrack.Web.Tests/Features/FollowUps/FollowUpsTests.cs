@@ -54,7 +54,7 @@ public sealed class FollowUpsTests(RunningSite site) : IClassFixture<RunningSite
     [Theory]
     [InlineData("/follow-ups", 5)]
     [InlineData("/follow-ups/{0}", 4)]
-    [InlineData("/", 8)]
+    [InlineData("/", 19)]
     public async Task A_page_asks_the_same_few_questions_however_many_there_are(string url, int budget)
     {
         var world = await site.NewWorld();

@@ -102,7 +102,7 @@ public sealed class ScanLogTests(RunningSite site) : IClassFixture<RunningSite>
 
     // What each page may ask of the database; two of it are for who is asking.
     [Theory]
-    [InlineData("/scans", 8)]
+    [InlineData("/scans", 9)]
     [InlineData("/scans/new?application=cardiac", 7)]
     [InlineData("/scans/{id}", 7)]
     [InlineData("/scans/{id}/edit", 9)]

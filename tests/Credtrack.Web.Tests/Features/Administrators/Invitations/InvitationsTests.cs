@@ -6,7 +6,7 @@ public sealed class InvitationsTests(RunningSite site) : IClassFixture<RunningSi
     public async Task Another_administrator_sends_a_link_for_a_new_password_to_the_own_address()
     {
         var world = await site.NewWorld();
-        var forgetful = await world.Administrator();
+        var forgetful = await world.Administrator("Fergus");
         using var ada = await world.As(await world.Administrator());
         await ada.Opens("/administrators");
         await ada.Presses((AngleSharp.Html.Dom.IHtmlButtonElement)ada.Page.QuerySelector($"form[action='/administrators/{forgetful.Id}/invitations'] button")!);
