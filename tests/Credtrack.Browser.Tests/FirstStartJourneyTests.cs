@@ -70,7 +70,7 @@ public sealed class FirstStartJourneyTests(Demonstration browser)
         await using var dora = await SignedIn(site, "dora@tests.example");
         await dora.GoesTo("Rulebooks");
         await dora.Follows(dora.Page.Locator("a[href^='/rulebooks/new']").First);
-        await dora.Page.GetByRole(AriaRole.Textbox, new() { Name = "The text" }).FillAsync("""
+        await dora.Types("Rulebook as JSON", """
             {
               "format": "credtrack-rulebook/1", "name": "Harbour rules", "version": 1, "effective": "2026-01-01", "timeZone": "Europe/Dublin", "counting": { "quality": { "min": 3 } },
               "applications": [{ "code": "ivc", "require": [{ "kind": "count", "min": 25 }] }]
