@@ -18,8 +18,8 @@ public sealed partial class HostileTextLaws(RunningSite site) : IClassFixture<Ru
     // The kinds that OWASP's cheat sheet on cross-site scripting lists (from memory), texts that databases and terminals trip over, and formulas.
     private static readonly string[] Texts =
     [
-        Markup, "</textarea></title></style><svg hostile onload=alert(1)>", "<a hostile href=javascript:alert(1)>a</a>", "&lt;b hostile&gt;", "{{7*7}}${7*7}@(7*7)", "'; DROP TABLE Scans; --", "=cmd|' /C calc'!A0",
-        "a\0b", "a\u001B[31mred", "evil\u202Etxt.exe", "\u2066hidden\u2069", "\uFFFD\uD83D", "😀 👩‍⚕️ ﷽ Z̸̧̛a̷͔l̵g̶o", "  ", "..\\..\\..\\etc\\passwd", "%00%0d%0aSet-Cookie:hostile=1", new('x', 100_000), new('"', 5_000),
+        Markup, "</textarea></title></style><svg hostile onload=alert(1)><a hostile href=javascript:alert(1)>a</a>", "&lt;b hostile&gt; {{7*7}}${7*7}@(7*7) '; DROP TABLE Scans; -- ..\\..\\etc %00%0d%0aSet-Cookie:hostile=1", "=cmd|' /C calc'!A0",
+        "a\0b", "a\u001B[31mred", "evil\u202Etxt.exe", "\u2066hidden\u2069", "\uFFFD\uD83D", "😀 👩‍⚕️ ﷽ Z̸̧̛a̷͔l̵g̶o", "  ", new('x', 100_000),
     ];
 
     private readonly HashSet<string> sent = [];
@@ -72,7 +72,7 @@ public sealed partial class HostileTextLaws(RunningSite site) : IClassFixture<Ru
     private static string[] Identifying()
     {
         using var file = JsonDocument.Parse(File.ReadAllText(Path.Combine(Sources.Root, "tests/Credtrack.Web.Tests/Laws/phi-strings.json")));
-        return [.. file.RootElement.GetProperty("pos").EnumerateArray().Select(pair => pair[0].GetString()!).Chunk(4).Select(few => string.Join("; ", few))];
+        return [.. file.RootElement.GetProperty("pos").EnumerateArray().Select(pair => pair[0].GetString()!).Chunk(6).Select(few => string.Join("; ", few))];
     }
 
     /// <summary>Goes to every page that can be reached, the first few of each shape, and tells on how many of them hostile words stood.</summary>
